@@ -1,0 +1,83 @@
+const isDev = process.env.NODE_ENV === 'development'
+
+export default defineNuxtConfig({
+  modules: ['@nuxt/eslint', '@nuxtjs/tailwindcss', '@pinia/nuxt', 'nuxt-auth-utils', 'nuxt-security'],
+  devtools: { enabled: false },
+  telemetry: false,
+  compatibilityDate: '2026-11-01',
+  future: { compatibilityVersion: 4 },
+  // Components carry their folder's name (BoatFields -> <BoatFields> in components/boat/Fields.vue).
+  imports: { dirs: [] },
+  css: ['~/assets/css/fonts.css'],
+  app: {
+    head: {
+      htmlAttrs: { lang: 'en' },
+      meta: [
+        { charset: 'utf-8' },
+        { name: 'viewport', content: 'width=device-width, initial-scale=1' },
+        { name: 'color-scheme', content: 'light dark' },
+      ],
+      link: [{ rel: 'icon', type: 'image/svg+xml', href: '/mark.svg' }],
+    },
+  },
+  vue: { runtimeCompiler: false },
+  experimental: { componentIslands: false, appManifest: false },
+  runtimeConfig: {
+    session: { name: 'kedgewise', maxAge: 90 * 24 * 3600, sessionHeader: false },
+  },
+  tailwindcss: { cssPath: '~/assets/css/main.css', viewer: false },
+  eslint: { config: { standalone: false, stylistic: { semi: false, quotes: 'single' } } },
+  typescript: {
+    strict: true,
+    tsConfig: { compilerOptions: { noUncheckedIndexedAccess: true } },
+    nodeTsConfig: {
+      compilerOptions: { noUncheckedIndexedAccess: true, allowJs: false },
+      include: ['../*.config.ts', '../tests/**/*.ts', '../seed/**/*.ts'],
+    },
+  },
+  security: {
+    headers: {
+      contentSecurityPolicy: {
+        'default-src': ['\'none\''],
+        'script-src': ['\'self\'', '\'nonce-{{nonce}}\'', '\'strict-dynamic\''],
+        'style-src': ['\'self\'', '\'unsafe-inline\''],
+        'img-src': ['\'self\'', 'data:'],
+        'font-src': ['\'self\''],
+        'connect-src': ['\'self\''],
+        'manifest-src': ['\'self\''],
+        'form-action': ['\'self\''],
+        'base-uri': ['\'none\''],
+        'frame-ancestors': ['\'none\''],
+        'object-src': ['\'none\''],
+        'script-src-attr': ['\'none\''],
+        'upgrade-insecure-requests': false,
+      },
+      crossOriginEmbedderPolicy: false,
+      referrerPolicy: 'strict-origin-when-cross-origin',
+      xFrameOptions: 'DENY',
+    },
+    nonce: true,
+    sri: false,
+    // Each of these looks only at headers a client can forge or at text it should let pass: ours stand in server/.
+    rateLimiter: false,
+    requestSizeLimiter: false,
+    xssValidator: false,
+    corsHandler: false,
+    allowedMethodsRestricter: false,
+    hidePoweredBy: true,
+    basicAuth: false,
+    csrf: false,
+    removeLoggers: false,
+  },
+  nitro: {
+    preset: 'node-server',
+    esbuild: { options: { target: 'node20' } },
+    typescript: { tsConfig: { compilerOptions: { noUncheckedIndexedAccess: true } } },
+  },
+  hooks: {
+    'vite:extendConfig': (config) => {
+      // The hot-reload socket would otherwise listen on every interface.
+      if (isDev && config.server) Object.assign(config.server, { hmr: { host: '127.0.0.1' } })
+    },
+  },
+})

@@ -1,0 +1,63 @@
+import type { ChainGrade, RopeConstruction } from './words'
+
+/** Chain: metric (diameterMm) or inch (sizeIn) sizes; a submerged weight wins over a size. Length 0 is allowed with a rope. */
+export interface Chain {
+  lengthM: number
+  diameterMm?: number
+  sizeIn?: string
+  grade?: ChainGrade
+  breakingN?: number
+  submergedWeightNPerM?: number
+}
+
+export interface Rope {
+  lengthM: number
+  diameterMm?: number
+  sizeIn?: string
+  construction?: RopeConstruction
+  breakingN?: number
+  submergedWeightNPerM?: number
+}
+
+export interface Snubber {
+  lengthM: number
+  diameterMm?: number
+  sizeIn?: string
+  construction?: RopeConstruction
+  breakingN?: number
+}
+
+export interface Shackle { sizeMm?: number, sizeIn?: string, breakingN?: number }
+
+export interface Rode { chain: Chain, rope?: Rope, snubber?: Snubber }
+
+export interface RodeRequest extends Rode {
+  /** seabed to bow, m */
+  heightM: number
+  horizontalLoadN: number
+  shackles?: Shackle[]
+  overRoller?: boolean
+}
+
+export type RodeRegime = 'grounded' | 'lifting' | 'clear'
+
+export interface StrengthPart { part: string, breakingN: number | null, allowedN: number | null, loadN: number, ok: boolean | null }
+
+export interface RodeAnswer {
+  regime: RodeRegime
+  shankAngleDeg: number
+  groundedChainM: number
+  groundedRopeM: number
+  spanM: number
+  tensionBowN: number
+  tensionAnchorN: number
+  verticalAnchorN: number
+  scope: number
+  leastLengthZeroAngleM: number
+  leastLength8DegM: number
+  upliftFactor: number
+  /** points from the anchor [0, 0] to the bow [spanM, heightM], m */
+  curve: [number, number][]
+  strength: StrengthPart[]
+  weakest: string | null
+}
