@@ -1,4 +1,26 @@
+import { cp } from 'node:fs/promises'
+import { join } from 'node:path'
+import { fileURLToPath } from 'node:url'
+import { build } from 'esbuild'
+
 const isDev = process.env.NODE_ENV === 'development'
+
+const here = fileURLToPath(new URL('.', import.meta.url))
+
+/** Nitro does not bundle a worker thread's entry: it is built beside the server, as the migrations lie beside it. */
+async function buildBeside(folder: string) {
+  await build({
+    entryPoints: [join(here, 'server/jobs/workers/fit.ts')],
+    outfile: join(folder, 'workers/fit.mjs'),
+    bundle: true,
+    platform: 'node',
+    target: 'node20',
+    format: 'esm',
+    minify: true,
+    alias: { '#shared': join(here, 'shared') },
+    logLevel: 'warning',
+  })
+}
 
 export default defineNuxtConfig({
   modules: ['@nuxt/eslint', '@nuxtjs/tailwindcss', '@pinia/nuxt', 'nuxt-auth-utils', 'nuxt-security'],
@@ -75,6 +97,14 @@ export default defineNuxtConfig({
     typescript: { tsConfig: { compilerOptions: { noUncheckedIndexedAccess: true } } },
   },
   hooks: {
+    'nitro:init': (nitro) => {
+      nitro.hooks.hook('compiled', async () => {
+        const { serverDir } = nitro.options.output
+        if (nitro.options.dev) return buildBeside(join(here, '.nuxt'))
+        await buildBeside(serverDir)
+        await cp(join(here, 'drizzle'), join(serverDir, 'drizzle'), { recursive: true })
+      })
+    },
     'vite:extendConfig': (config) => {
       // The hot-reload socket would otherwise listen on every interface.
       if (isDev && config.server) Object.assign(config.server, { hmr: { host: '127.0.0.1' } })

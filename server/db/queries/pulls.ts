@@ -1,0 +1,51 @@
+import { and, asc, countDistinct, eq, isNotNull, isNull, ne } from 'drizzle-orm'
+import type { PullRecord } from '../../../shared/types/holding'
+import type { Family, NumberedSeabed, PullAfter, SettingOutcome, VeerOutcome } from '../../../shared/types/words'
+import type { Database, Transaction } from '../client'
+import { designs, modifications, pulls, rigs, sizes, trials } from '../schema'
+
+const published = and(isNotNull(trials.publishedAt), isNull(pulls.supersededById))
+
+/** The published pulls that stand, as the fit takes them. A fluke setting is part of the pull, not a modification. */
+export async function publishedPulls(db: Database | Transaction): Promise<PullRecord[]> {
+  const rows = await db.select({
+    trial: trials.slug, rig: rigs.slug, calibrationSd: rigs.calibrationSd,
+    design: designs.slug, family: designs.family, massKg: sizes.massKg, modification: modifications.slug,
+    seabed: pulls.seabed, setting: pulls.setting, heldN: pulls.heldN, movedN: pulls.movedN,
+    shankAngleDeg: pulls.shankAngleDeg, after: pulls.after, veer: pulls.veer, fresh: pulls.fresh, pair: pulls.pair,
+  }).from(pulls)
+    .innerJoin(trials, eq(trials.id, pulls.trialId))
+    .innerJoin(rigs, eq(rigs.id, trials.rigId))
+    .innerJoin(designs, eq(designs.id, pulls.designId))
+    .innerJoin(sizes, eq(sizes.id, pulls.sizeId))
+    .leftJoin(modifications, eq(modifications.id, pulls.modificationId))
+    .where(published)
+    .orderBy(asc(pulls.id))
+  return rows.map(row => ({
+    trial: row.trial,
+    rig: row.rig,
+    ...row.calibrationSd === null ? {} : { calibrationSd: row.calibrationSd },
+    design: row.design,
+    family: row.family as Family,
+    massKg: row.massKg,
+    seabed: row.seabed as NumberedSeabed,
+    ...row.modification === null ? {} : { modification: row.modification },
+    set: row.setting === 'set' || row.setting === 'setAfterDragging',
+    setting: row.setting as SettingOutcome,
+    heldN: row.heldN,
+    movedN: row.movedN,
+    shankAngleDeg: row.shankAngleDeg,
+    fresh: row.fresh,
+    ...row.after === null ? {} : { after: row.after as PullAfter },
+    ...row.veer === null ? {} : { veer: row.veer as VeerOutcome },
+    ...row.pair === null ? {} : { pair: row.pair },
+  }))
+}
+
+/** How many rigs made the published pulls: with one, a bias common to all of them cannot be seen. */
+export async function countRigs(db: Database | Transaction): Promise<number> {
+  const [row] = await db.select({ rigs: countDistinct(trials.rigId) }).from(trials)
+    .innerJoin(pulls, eq(pulls.trialId, trials.id))
+    .where(and(published, ne(pulls.setting, 'fouled')))
+  return row?.rigs ?? 0
+}

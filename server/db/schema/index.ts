@@ -1,0 +1,4 @@
+export * from './catalogue'
+export * from './trials'
+export * from './fits'
+export * from './facts'
