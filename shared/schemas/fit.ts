@@ -1,0 +1,36 @@
+import * as z from 'zod/mini'
+import { families, numberedSeabeds } from '#shared/types/words'
+import { fieldsOf, listOf, oneOf, quantity, saying, shortText, yesOrNo } from './fields'
+
+const load = quantity(0, 5_000_000, 'N', 'Load')
+const movedWords = saying('null (never moved) or a number between 0.001 and 5 000 000 N')
+
+export const fitPull = fieldsOf({
+  trial: shortText(80, 'Trial: one rig, one place, one day'),
+  design: shortText(80, 'Design'),
+  family: oneOf(families, 'Family of the design'),
+  massKg: quantity(0.5, 2000, 'kg', 'Mass of the anchor'),
+  seabed: oneOf(numberedSeabeds, 'Seabed'),
+  modification: z.optional(shortText(80, 'Change made to the anchor for the trial')),
+  rig: z.optional(shortText(80, 'Rig; without one no calibration error is taken')),
+  calibrationSd: z.optional(quantity(0.001, 1, '', 'Standard deviation of the rig\'s calibration error in ln load; 0.10 if left out')),
+  set: z.optional(yesOrNo('False: never set, counted but not fitted; true if left out')),
+  heldN: load.check(z.describe('Greatest load held, N; 0 with set true: moved at the first step')),
+  movedN: z.nullable(z.number(movedWords).check(z.minimum(0.001, movedWords), z.maximum(5_000_000, movedWords)))
+    .check(z.describe('First load above at which it moved, N; null: the rig\'s limit, or stopped early')),
+  shankAngleDeg: z.optional(quantity(0, 60, 'degrees', 'Shank angle of the trial; 0 if left out')),
+}, 'One anchor set and loaded in steps').check(z.superRefine((pull, context) => {
+  if (pull.set === false) return
+  if (pull.movedN === null && pull.heldN === 0) {
+    context.addIssue({ code: 'custom', path: ['heldN'], input: 0, message: 'must be more than 0 N where movedN is null and set is true: such a pull says nothing' })
+  }
+  if (pull.movedN !== null && pull.movedN <= pull.heldN) {
+    context.addIssue({ code: 'custom', path: ['movedN'], input: pull.movedN, message: `must be more than heldN, ${pull.heldN} N` })
+  }
+}))
+
+/** POST /api/fits: what would these pulls say? */
+export const fitRequest = fieldsOf({
+  pulls: listOf(fitPull, 1, 5000, 'Pulls'),
+  pooled: z.optional(yesOrNo('False: one free mean per design and seabed, nothing shared; true if left out')),
+}, 'Pulls to fit; nothing is stored')
