@@ -61,3 +61,25 @@ export function alive(pid) {
     return error.code === 'EPERM'
   }
 }
+
+function isFree(port) {
+  return new Promise((resolve) => {
+    const server = createServer()
+    server.on('error', () => resolve(false))
+    server.listen(port, '127.0.0.1', () => server.close(() => resolve(true)))
+  })
+}
+
+/** The port named by PORT, if it is a port and free; otherwise says so and ends. */
+export async function portOrExit(text) {
+  const port = Number(text)
+  if (!Number.isInteger(port) || port < 1 || port > 65535) {
+    console.error(`PORT is ${text}: a whole number from 1 to 65535 is needed`)
+    process.exit(1)
+  }
+  if (!await isFree(port)) {
+    console.error(`Port ${port} is taken: set PORT to another, e.g. PORT=3001 npm run demo`)
+    process.exit(1)
+  }
+  return port
+}

@@ -1,0 +1,68 @@
+// The project on this machine: where it lies, its secrets, and the steps that demo, dev and tests share.
+import { randomBytes } from 'node:crypto'
+import { existsSync, mkdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs'
+import { join } from 'node:path'
+import { fileURLToPath } from 'node:url'
+import { alive, run, say } from './shell.mjs'
+import { buildSources, openStamps, seedSources, sourceHash } from './stamps.mjs'
+
+export const root = fileURLToPath(new URL('../..', import.meta.url)).replace(/\/$/, '')
+export const dataFolder = join(root, '.data')
+export const stamps = openStamps(join(dataFolder, 'stamps.json'))
+export const builtServer = join(root, '.output', 'server', 'index.mjs')
+
+const bin = name => join(root, 'node_modules', '.bin', name)
+
+/** A random secret of this clone, made on first use. */
+export function secret(name) {
+  mkdirSync(dataFolder, { recursive: true })
+  const file = join(dataFolder, `${name}.secret`)
+  if (!existsSync(file)) writeFileSync(file, randomBytes(32).toString('base64url'), { mode: 0o600 })
+  return readFileSync(file, 'utf8')
+}
+
+/** Lets one demo (or dev server) at a time use this clone's data; hands back the way to let go. */
+export function holdLock(name) {
+  mkdirSync(dataFolder, { recursive: true })
+  const file = join(dataFolder, `${name}.pid`)
+  const other = existsSync(file) ? Number(readFileSync(file, 'utf8')) : 0
+  if (other && other !== process.pid && alive(other)) {
+    throw new Error(`another ${name} of this clone is running as process ${other}: stop it first`)
+  }
+  writeFileSync(file, String(process.pid))
+  return () => rmSync(file, { force: true })
+}
+
+/** Builds the application unless it was built from these very sources. */
+export async function ensureBuild() {
+  const hash = sourceHash(root, buildSources)
+  if (existsSync(builtServer) && stamps.get('build') === hash) return
+  say('Building the application')
+  stamps.set('build', null)
+  await run(bin('nuxt'), ['build'], { cwd: root, env: { ...process.env, NODE_ENV: 'production' }, stdio: ['ignore', 'ignore', 'inherit'] })
+  stamps.set('build', hash)
+}
+
+/** Seeds the database unless this cluster holds this very world. */
+export async function ensureSeed(url, { known }) {
+  const hash = sourceHash(root, seedSources)
+  if (known && stamps.get('seed') === hash) return
+  say('Writing the demo world')
+  await run(bin('tsx'), [join(root, 'seed', 'seed.ts')], { cwd: root, env: { ...process.env, DATABASE_URL: url } })
+  if (known !== undefined) stamps.set('seed', hash)
+}
+
+/** What a demo server finds in its environment. */
+export function demoEnvironment({ port, url }) {
+  return {
+    ...process.env,
+    KEDGEWISE_DEMO: '1',
+    HOST: '127.0.0.1',
+    PORT: String(port),
+    DATABASE_URL: url,
+    APP_ORIGIN: `http://localhost:${port}`,
+    NUXT_SESSION_PASSWORD: secret('session'),
+    // Graceful shutdown stays on: any value here would switch it off.
+    NITRO_SHUTDOWN_DISABLED: undefined,
+  }
+}
