@@ -1,7 +1,8 @@
 import { boatTypes } from '#shared/types/words'
 import type { BoatType } from '#shared/types/words'
 import type { Boat, WindagePart } from '#shared/types/load'
-import { inRange } from '#shared/units/range'
+import { FieldError } from '#shared/utils/fieldError'
+import { within } from '#shared/load/within'
 import { defaultSideAreaM2, defaultWindage } from '#shared/load/windage'
 
 /** A boat as a reader gives it, the beam left out if need be. */
@@ -22,23 +23,23 @@ export const waterlineRatio = 0.88
 
 function checkType(type: BoatType): BoatType {
   if (boatTypes.includes(type)) return type
-  throw new RangeError(`boat.type must be one of ${boatTypes.join(', ')}, got ${String(type)}`)
+  throw new FieldError('boat.type', `boat.type must be one of ${boatTypes.join(', ')}, got ${String(type)}`)
 }
 
 function checkParts(parts: readonly WindagePart[]): WindagePart[] {
-  if (parts.length === 0) throw new RangeError('boat.windage must have between 1 and 50 parts, got 0')
+  if (parts.length < 1 || parts.length > 50) throw new FieldError('boat.windage', `boat.windage must have between 1 and 50 parts, got ${parts.length}`)
   return parts.map(({ part, areaM2, dragCoefficient }, index) => ({
     part,
-    areaM2: inRange(`boat.windage.${index}.areaM2`, areaM2, 0, 5000),
-    dragCoefficient: inRange(`boat.windage.${index}.dragCoefficient`, dragCoefficient, 0, 3),
+    areaM2: within(`boat.windage.${index}.areaM2`, areaM2, 0, 5000),
+    dragCoefficient: within(`boat.windage.${index}.dragCoefficient`, dragCoefficient, 0, 3),
   }))
 }
 
 function checkWaterline(waterline: NonNullable<Boat['waterline']>): NonNullable<Boat['waterline']> {
   return {
-    lengthM: inRange('boat.waterline.lengthM', waterline.lengthM, 0.5, 150),
-    beamM: inRange('boat.waterline.beamM', waterline.beamM, 0.1, 50),
-    draughtM: inRange('boat.waterline.draughtM', waterline.draughtM, 0.05, 20),
+    lengthM: within('boat.waterline.lengthM', waterline.lengthM, 0.5, 150),
+    beamM: within('boat.waterline.beamM', waterline.beamM, 0.1, 50),
+    draughtM: within('boat.waterline.draughtM', waterline.draughtM, 0.05, 20),
   }
 }
 
@@ -53,12 +54,12 @@ function checkWaterline(waterline: NonNullable<Boat['waterline']>): NonNullable<
 export function completeBoat(boat: BoatInput): CompleteBoat {
   const guessed: string[] = []
   const given = (name: keyof Boat & string, value: number | undefined, guess: number, min: number, max: number): number => {
-    if (value !== undefined) return inRange(`boat.${name}`, value, min, max)
+    if (value !== undefined) return within(`boat.${name}`, value, min, max)
     guessed.push(name)
     return guess
   }
   const type = checkType(boat.type)
-  const lengthM = inRange('boat.lengthM', boat.lengthM, 1, 150)
+  const lengthM = within('boat.lengthM', boat.lengthM, 1, 150)
   const ratio = ratios[type]
   const beamM = given('beamM', boat.beamM, ratio.beam * lengthM, 0.3, 50)
   const freeboardM = given('freeboardM', boat.freeboardM, type === 'motor' ? 0.07 * lengthM + 0.6 : 0.06 * lengthM + 0.5, 0.1, 20)

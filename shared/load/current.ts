@@ -1,6 +1,7 @@
 import type { CompleteBoat } from '#shared/load/boat'
 import { G } from '#shared/units/constants'
-import { inRange } from '#shared/units/range'
+import { FieldError } from '#shared/utils/fieldError'
+import { within } from '#shared/load/within'
 
 /** Density of sea water, kg/m3, and its kinematic viscosity, m2/s (UFC 4-159-03). */
 const SEA_KG_M3 = 1026
@@ -19,11 +20,11 @@ type Afloat = Pick<CompleteBoat, 'waterline' | 'displacementKg' | 'propellerArea
  */
 export function currentLoadN(boat: Afloat, currentMs: number): number {
   if (currentMs === 0) return 0
-  if (!(currentMs >= 0.05 && currentMs <= 5)) throw new RangeError(`currentMs must be 0 or between 0.05 and 5, got ${String(currentMs)}`)
+  if (!(currentMs >= 0.05 && currentMs <= 5)) throw new FieldError('currentMs', `currentMs must be 0 or between 0.05 and 5, got ${String(currentMs)}`)
   const { lengthM, beamM, draughtM } = boat.waterline
   const pressurePa = 0.5 * SEA_KG_M3 * currentMs ** 2
   const wettedM2 = 1.7 * draughtM * lengthM + boat.displacementKg * G / (draughtM * SEA_KG_M3 * G)
-  const reynolds = inRange('Reynolds number', currentMs * lengthM / SEA_VISCOSITY_M2_S, 2e4, 1e10)
+  const reynolds = within('Reynolds number', currentMs * lengthM / SEA_VISCOSITY_M2_S, 2e4, 1e10)
   const frictionCoefficient = 0.075 / (Math.log10(reynolds) - 2) ** 2
   return pressurePa * (0.1 * beamM * draughtM + frictionCoefficient * wettedM2 + boat.propellerAreaM2)
 }

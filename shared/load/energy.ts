@@ -1,6 +1,7 @@
 import { swells } from '#shared/types/words'
 import type { Swell } from '#shared/types/words'
-import { inRange } from '#shared/units/range'
+import { FieldError } from '#shared/utils/fieldError'
+import { within } from '#shared/load/within'
 
 const speedsMs: Readonly<Record<Swell, number>> = { none: 0, sheltered: 0.25, moderate: 0.5, open: 1 }
 
@@ -15,7 +16,7 @@ const ADDED_MASS = 0.075
  */
 export function surgeSpeedMs(swell: Swell): number {
   if (Object.hasOwn(speedsMs, swell)) return speedsMs[swell]
-  throw new RangeError(`swell must be one of ${swells.join(', ')}, got ${String(swell)}`)
+  throw new FieldError('swell', `swell must be one of ${swells.join(', ')}, got ${String(swell)}`)
 }
 
 /**
@@ -27,5 +28,5 @@ export function surgeSpeedMs(swell: Swell): number {
  * @throws RangeError outside those ranges
  */
 export function surgeEnergyJ(displacementKg: number, swell: Swell): number {
-  return 0.5 * inRange('displacementKg', displacementKg, 0, 1e7) * (1 + ADDED_MASS) * surgeSpeedMs(swell) ** 2
+  return 0.5 * within('displacementKg', displacementKg, 0, 1e7) * (1 + ADDED_MASS) * surgeSpeedMs(swell) ** 2
 }

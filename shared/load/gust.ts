@@ -1,7 +1,8 @@
 import { exposures } from '#shared/types/words'
 import type { Exposure } from '#shared/types/words'
 import type { Wind } from '#shared/types/load'
-import { inRange } from '#shared/units/range'
+import { FieldError } from '#shared/utils/fieldError'
+import { within } from '#shared/load/within'
 
 /** The exposure taken when none is given. */
 export const defaultExposure: Exposure = 'offshoreWind'
@@ -19,7 +20,19 @@ export const windageCentreM = 2
  */
 export function gustFactor(exposure: Exposure = defaultExposure): number {
   if (Object.hasOwn(factors, exposure)) return factors[exposure]
-  throw new RangeError(`wind.exposure must be one of ${exposures.join(', ')}, got ${String(exposure)}`)
+  throw new FieldError('wind.exposure', `wind.exposure must be one of ${exposures.join(', ')}, got ${String(exposure)}`)
+}
+
+/**
+ * Ratio of the gust to the speed entered: the gust factor for a mean, 1 for a gust.
+ *
+ * @throws RangeError for an unknown kind or exposure
+ */
+export function gustRatio(wind: Pick<Wind, 'kind' | 'exposure'>): number {
+  const factor = gustFactor(wind.exposure)
+  if (wind.kind === 'mean') return factor
+  if (wind.kind === 'gust') return 1
+  throw new FieldError('wind.kind', `wind.kind must be mean or gust, got ${String(wind.kind)}`)
 }
 
 /**
@@ -30,11 +43,9 @@ export function gustFactor(exposure: Exposure = defaultExposure): number {
  * @throws RangeError for a speed outside that range, or an unknown kind or exposure
  */
 export function meanAndGust(wind: Pick<Wind, 'speedMs' | 'kind' | 'exposure'>): { meanMs: number, gustMs: number } {
-  const speedMs = inRange('wind.speedMs', wind.speedMs, 0, 150)
-  const factor = gustFactor(wind.exposure)
-  if (wind.kind === 'mean') return { meanMs: speedMs, gustMs: speedMs * factor }
-  if (wind.kind === 'gust') return { meanMs: speedMs / factor, gustMs: speedMs }
-  throw new RangeError(`wind.kind must be mean or gust, got ${String(wind.kind)}`)
+  const speedMs = within('wind.speedMs', wind.speedMs, 0, 150)
+  const gustMs = speedMs * gustRatio(wind)
+  return { meanMs: wind.kind === 'mean' ? speedMs : gustMs / gustFactor(wind.exposure), gustMs }
 }
 
 /**
@@ -45,5 +56,5 @@ export function meanAndGust(wind: Pick<Wind, 'speedMs' | 'kind' | 'exposure'>): 
  * @throws RangeError outside that range
  */
 export function heightFactor(heightM = windageCentreM): number {
-  return (Math.max(inRange('heightM', heightM, 0, 100), 1) / 10) ** (1 / 7)
+  return (Math.max(within('heightM', heightM, 0, 100), 1) / 10) ** (1 / 7)
 }

@@ -1,4 +1,4 @@
-import { inRange } from '#shared/units/range'
+import { within } from '#shared/load/within'
 
 /** Density of air at 15 degrees C and sea level, kg/m3 (ISO 2533). */
 export const AIR_KG_M3 = 1.225
@@ -12,7 +12,7 @@ export const AIR_KG_M3 = 1.225
  * @throws RangeError outside those ranges
  */
 export function velocityPressurePa(speedMs: number, densityKgM3 = AIR_KG_M3): number {
-  return 0.5 * inRange('densityKgM3', densityKgM3, 1e-6, 2000) * inRange('speedMs', speedMs, 0, 200) ** 2
+  return 0.5 * within('densityKgM3', densityKgM3, 1e-6, 2000) * within('speedMs', speedMs, 0, 200) ** 2
 }
 
 /**
@@ -25,5 +25,5 @@ export function velocityPressurePa(speedMs: number, densityKgM3 = AIR_KG_M3): nu
  * @throws RangeError outside those ranges
  */
 export function dragN(dragAreaM2: number, speedMs: number, densityKgM3 = AIR_KG_M3): number {
-  return velocityPressurePa(speedMs, densityKgM3) * inRange('dragAreaM2', dragAreaM2, 0, 1e6)
+  return velocityPressurePa(speedMs, densityKgM3) * within('dragAreaM2', dragAreaM2, 0, 1e6)
 }

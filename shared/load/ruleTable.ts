@@ -1,6 +1,6 @@
 import type { RuleTableEntry } from '#shared/types/ranking'
 import { waterlineRatio } from '#shared/load/boat'
-import { inRange } from '#shared/units/range'
+import { within } from '#shared/load/within'
 
 /** Main anchor, kg, for mean lengths of 6, 7 ... 24 m. */
 const anchorsKg: readonly number[] = [8, 9, 10, 11, 13, 15, 18, 21, 24, 27, 30, 34, 38, 42, 47, 52, 57, 62, 68]
@@ -22,8 +22,8 @@ function chainMm(rowM: number): number {
  * @throws RangeError outside those ranges
  */
 export function ruleTable(lengthM: number, waterlineLengthM?: number): RuleTableEntry {
-  inRange('boat.lengthM', lengthM, 1, 150)
-  const waterlineM = waterlineLengthM === undefined ? waterlineRatio * lengthM : inRange('boat.waterline.lengthM', waterlineLengthM, 0.5, 150)
+  within('boat.lengthM', lengthM, 1, 150)
+  const waterlineM = waterlineLengthM === undefined ? waterlineRatio * lengthM : within('boat.waterline.lengthM', waterlineLengthM, 0.5, 150)
   const meanLengthM = (lengthM + waterlineM) / 2
   const entry = { table: 'UK small-vessel code, table 20.1', source: 'UK MCA small-vessel code, table 20.1: main anchor of high holding power', meanLengthM }
   const rowM = Math.max(FIRST_M, Math.ceil(meanLengthM - 1e-9))

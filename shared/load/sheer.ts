@@ -1,5 +1,5 @@
 import type { BoatType } from '#shared/types/words'
-import { inRange } from '#shared/units/range'
+import { within } from '#shared/load/within'
 
 /**
  * Angle to the wind that a boat is taken to sheer through when none is given, degrees: 15 for a multihull on a bridle, 30 for the others (common practice, no source).
@@ -20,8 +20,8 @@ export function defaultSheerDeg(type: BoatType): number {
  * @throws RangeError outside those ranges
  */
 export function sheerDragAreaM2(frontM2: number, sideM2: number, sheerRad: number): number {
-  inRange('sheerRad', sheerRad, 0, Math.PI / 2)
-  const along = inRange('frontM2', frontM2, 0, 1e6) * Math.cos(sheerRad)
-  const across = inRange('sideM2', sideM2, 0, 1e6) * (Math.sin(sheerRad) - Math.sin(5 * sheerRad) / 20) / 0.95
+  within('sheerRad', sheerRad, 0, Math.PI / 2)
+  const along = within('frontM2', frontM2, 0, 1e6) * Math.cos(sheerRad)
+  const across = within('sideM2', sideM2, 0, 1e6) * (Math.sin(sheerRad) - Math.sin(5 * sheerRad) / 20) / 0.95
   return Math.max(frontM2, Math.hypot(along, across))
 }

@@ -1,10 +1,10 @@
 import type { LoadPart, SurveyLoad, Wind, WindagePart } from '#shared/types/load'
 import type { CompleteBoat } from '#shared/load/boat'
-import { gustFactor, heightFactor, meanAndGust } from '#shared/load/gust'
+import { gustRatio, heightFactor } from '#shared/load/gust'
 import { AIR_KG_M3 } from '#shared/load/pressure'
 import { defaultSheerDeg, sheerDragAreaM2 } from '#shared/load/sheer'
 import { DEG_RAD } from '#shared/units/constants'
-import { inRange } from '#shared/units/range'
+import { within } from '#shared/load/within'
 
 /** Wind loads of a boat, N: `steadyN` at the speed entered, `gustN` after the gust factor, `sheerN` the gust with the boat sheering; parts add up to `steadyN`. */
 export interface WindLoads { steadyN: number, gustN: number, sheerN: number, parts: LoadPart[] }
@@ -32,10 +32,10 @@ function perDragArea(wind: Pick<Wind, 'at10m'>): number {
  */
 export function windLoadFactors(boat: CompleteBoat, wind: Omit<Wind, 'speedMs'>): WindLoadFactors {
   const frontM2 = frontDragAreaM2(boat.windage)
-  const sheerDeg = inRange('wind.sheerDeg', wind.sheerDeg ?? defaultSheerDeg(boat.type), 0, 90)
+  const sheerDeg = within('wind.sheerDeg', wind.sheerDeg ?? defaultSheerDeg(boat.type), 0, 90)
   const sheerM2 = sheerDragAreaM2(frontM2, boat.sideAreaM2 * boat.sideDragCoefficient, sheerDeg * DEG_RAD)
   const steady = perDragArea(wind)
-  const gust = steady * (wind.kind === 'mean' ? gustFactor(wind.exposure) ** 2 : 1)
+  const gust = steady * gustRatio(wind) ** 2
   return { steady: steady * frontM2, gust: gust * frontM2, sheer: gust * sheerM2 }
 }
 
@@ -47,8 +47,7 @@ export function windLoadFactors(boat: CompleteBoat, wind: Omit<Wind, 'speedMs'>)
  * @throws RangeError for a wind out of range
  */
 export function windLoads(boat: CompleteBoat, wind: Wind): WindLoads {
-  meanAndGust(wind)
-  const square = wind.speedMs ** 2
+  const square = within('wind.speedMs', wind.speedMs, 0, 150) ** 2
   const { steady, gust, sheer } = windLoadFactors(boat, wind)
   const partFactor = perDragArea(wind) * square
   return {
@@ -69,7 +68,7 @@ export function windLoads(boat: CompleteBoat, wind: Wind): WindLoads {
  * @throws RangeError for a negative or unbounded load
  */
 export function surveyLoad(wind: WindLoads, currentN: number, surgeN: number | null): SurveyLoad {
-  inRange('currentN', currentN, 0, 1e9)
-  const totalN = surgeN === null ? null : Math.max(wind.sheerN, wind.gustN + inRange('surgeN', surgeN, 0, 1e9)) + currentN
+  within('currentN', currentN, 0, 1e9)
+  const totalN = surgeN === null ? null : Math.max(wind.sheerN, wind.gustN + within('surgeN', surgeN, 0, 1e9)) + currentN
   return { steadyN: wind.steadyN, gustN: wind.gustN, sheerN: wind.sheerN, currentN, surgeN, totalN, parts: wind.parts }
 }

@@ -1,6 +1,6 @@
 import type { Boat, TableLoad } from '#shared/types/load'
 import { FT_M, KN_MS, LBF_N } from '#shared/units/constants'
-import { inRange } from '#shared/units/range'
+import { within } from '#shared/load/within'
 import { tableRows } from '#shared/load/tableRows'
 import type { TableRow } from '#shared/load/tableRows'
 
@@ -29,9 +29,9 @@ export interface TableAnswer { table: TableLoad | null, note?: string }
  * @throws RangeError outside those ranges
  */
 export function tableLoad(boat: Pick<Boat, 'type' | 'lengthM' | 'beamM'>, speedMs: number): TableAnswer {
-  const scale = LBF_N * (inRange('speedMs', speedMs, 0, 150) / (30 * KN_MS)) ** 2
-  const byLength = rowIndex(inRange('boat.lengthM', boat.lengthM, 1, 150), row => row.loaFt)
-  inRange('boat.beamM', boat.beamM, 0.3, 50)
+  const scale = LBF_N * (within('speedMs', speedMs, 0, 150) / (30 * KN_MS)) ** 2
+  const byLength = rowIndex(within('boat.lengthM', boat.lengthM, 1, 150), row => row.loaFt)
+  within('boat.beamM', boat.beamM, 0.3, 50)
   const multihull = boat.type === 'sailMultihull'
   const byBeam = multihull ? 0 : rowIndex(boat.beamM, row => boat.type === 'motor' ? row.beamPowerFt : row.beamSailFt)
   const index = Math.max(byLength, byBeam)
