@@ -53,8 +53,9 @@ export interface RodeAnswer {
   tensionAnchorN: number
   verticalAnchorN: number
   scope: number
-  leastLengthZeroAngleM: number
-  leastLength8DegM: number
+  /** null where no length gives that angle: a weightless rode never lies flat */
+  leastLengthZeroAngleM: number | null
+  leastLength8DegM: number | null
   upliftFactor: number
   /** points from the anchor [0, 0] to the bow [spanM, heightM], m */
   curve: [number, number][]
