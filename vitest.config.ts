@@ -1,15 +1,24 @@
 import { fileURLToPath } from 'node:url'
-import { defineConfig } from 'vitest/config'
+import { defineConfig, type TestProjectInlineConfiguration } from 'vitest/config'
 
-const shared = fileURLToPath(new URL('./shared', import.meta.url))
+const folder = (name: string) => fileURLToPath(new URL(`./${name}`, import.meta.url))
+
+const project = (name: string, include: string, test: TestProjectInlineConfiguration['test'] = {}): TestProjectInlineConfiguration =>
+  ({ extends: true, test: { name, include: [include], ...test } })
+
+const served = { globalSetup: './tests/api/globalSetup.ts', hookTimeout: 120_000, testTimeout: 60_000 }
 
 export default defineConfig({
-  resolve: { alias: { '#shared': shared } },
+  resolve: { alias: { '#shared': folder('shared'), '~': folder('app') } },
   test: {
+    maxWorkers: 2,
     projects: [
-      { extends: true, test: { name: 'unit', include: ['tests/unit/**/*.test.ts'], testTimeout: 20_000 } },
-      { extends: true, test: { name: 'reference', include: ['tests/reference/**/*.test.ts'], testTimeout: 120_000 } },
-      { extends: true, test: { name: 'architecture', include: ['tests/architecture/**/*.test.ts'], testTimeout: 30_000 } },
+      project('unit', 'tests/unit/**/*.test.ts', { testTimeout: 30_000 }),
+      project('reference', 'tests/reference/**/!(*.long).test.ts', { testTimeout: 120_000 }),
+      project('architecture', 'tests/architecture/**/*.test.ts', { testTimeout: 60_000 }),
+      project('api', 'tests/api/**/*.test.ts', served),
+      project('browser', 'tests/browser/**/*.test.ts', served),
+      project('long', 'tests/**/*.long.test.ts', { testTimeout: 3_600_000 }),
     ],
   },
 })

@@ -2,31 +2,22 @@
 import { createHash } from 'node:crypto'
 import { fileURLToPath } from 'node:url'
 import { sql } from 'drizzle-orm'
-import { connect, type Transaction } from '../server/db/client'
+import { connect } from '../server/db/client'
 import { applyMigrations } from '../server/db/migrate'
 import { designs, facts } from '../server/db/schema'
+import { transact } from '../server/db/transact'
 import { openQueue, queues, startQueue } from '../server/jobs/queue'
 import { makeWorld } from './world'
-import { shankAngleOf } from './world/shankAngle'
 import { writeWorld } from './write'
 
 const fact = 'demo world'
 const tables = 'covariances, estimates, fits, pulls, trials, rigs, modifications, sizes, designs, families, seabeds, facts'
 
-/** A pg-boss database on an open transaction, so that the job is there if and only if the rows are. */
-const inTransaction = (tx: Transaction) => ({
-  executeSql: async (text: string, values: unknown[]) => {
-    const parts = text.split(/\$(\d+)/)
-    const chunks = parts.map((part, index) => index % 2 ? sql`${values[Number(part) - 1]}` : sql.raw(part))
-    return { rows: (await tx.execute(sql.join(chunks))).rows }
-  },
-})
-
 async function seed(url: string): Promise<string> {
   await applyMigrations(url, fileURLToPath(new URL('../drizzle', import.meta.url)))
   const world = makeWorld()
   const hash = createHash('sha256').update(JSON.stringify(world)).digest('hex')
-  const { db, close } = connect(url)
+  const { db, pool, close } = connect(url)
   const boss = openQueue(url, error => console.error(error.message))
   try {
     const [known] = await db.select().from(facts)
@@ -35,11 +26,11 @@ async function seed(url: string): Promise<string> {
       throw new Error('DATABASE_URL holds designs that are not the demo world\'s: nothing was written')
     }
     await startQueue(boss)
-    await db.transaction(async (tx) => {
+    await transact(pool, async (tx, plain) => {
       await tx.execute(sql.raw(`truncate ${tables} restart identity cascade`))
-      await writeWorld(tx, world, shankAngleOf(world))
+      await writeWorld(tx, world)
       await tx.insert(facts).values({ name: fact, value: hash })
-      await boss.send(queues.refit, {}, { db: inTransaction(tx) })
+      await boss.send(queues.refit, {}, { db: plain })
     })
     return `wrote ${world.designs.length} invented designs, ${world.trials.length} trials and ${world.pulls.length} pulls; a refit is queued`
   }

@@ -47,17 +47,18 @@ async function writeTrials(tx: Transaction, world: World) {
 }
 
 /** Writes every row of the demo world. The tables must be empty. */
-export async function writeWorld(tx: Transaction, world: World, shankAngleDeg: (pull: World['pulls'][number]) => number): Promise<void> {
+export async function writeWorld(tx: Transaction, world: World): Promise<void> {
   const { designId, sizeId } = await writeCatalogue(tx, world)
   const modificationId = idsBySlug(await tx.insert(modifications)
     .values(world.modifications.map(({ slug, name, description }) => ({ slug, name, description })))
     .returning({ id: modifications.id, slug: modifications.slug }))
   const trialId = await writeTrials(tx, world)
+  const angles = new Map(world.trials.map(trial => [trial.slug, trial.shankAngleDeg]))
   const rows = world.pulls.map(pull => ({
     trialId: trialId(pull.trial), ordinal: pull.order, designId: designId(pull.design), sizeId: sizeId(pull.design, pull.massKg),
     modificationId: pull.modification === null ? null : modificationId(pull.modification),
     anchorSetting: pull.anchorSetting, pair: pull.pair, seabed: pull.seabed, setting: pull.setting, firstTry: pull.firstTry, fresh: pull.fresh,
-    heldN: pull.heldN, movedN: pull.movedN, shankAngleDeg: shankAngleDeg(pull), end: pull.end, creepMMin: pull.creepRateMPerMin,
+    heldN: pull.heldN, movedN: pull.movedN, shankAngleDeg: angles.get(pull.trial), end: pull.end, creepMMin: pull.creepRateMPerMin,
     after: pull.after, veerDeg: pull.veerDeg, veer: pull.veerOutcome, attitude: pull.attitude, fouling: pull.fouling, condition: pull.condition,
     eastM: pull.eastM, northM: pull.northM, note: pull.note ?? '',
   }))

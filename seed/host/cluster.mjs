@@ -1,9 +1,9 @@
 // A PostgreSQL cluster of the project's own, on 127.0.0.1 only.
-import { chmodSync, existsSync, mkdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs'
+import { chmodSync, existsSync, mkdirSync, readFileSync, readdirSync, rmSync, writeFileSync } from 'node:fs'
 import { createHash, randomBytes } from 'node:crypto'
 import { join } from 'node:path'
-import { freePort, isRoot, read, run, succeeds } from './shell.mjs'
-import { ensurePostgres } from './packages.mjs'
+import { alive, freePort, isRoot, read, run, succeeds } from './shell.mjs'
+import { ensurePostgres, postgresBin } from './packages.mjs'
 
 const owner = 'kedgewise'
 
@@ -73,5 +73,19 @@ export async function startCluster({ root, wanted, settings = {} }) {
     stop: async () => {
       await read(...control('stop', '-m', 'fast', '-w'), { cwd: '/' }).catch(() => {})
     },
+  }
+}
+
+/** Stops and removes the clusters `prefix<pid>` that processes which are no more left behind in `folder` or beside it. */
+export async function sweepClusters(folder, prefix) {
+  const bin = postgresBin()
+  const parents = [folder, ...existsSync('/var/tmp') ? readdirSync('/var/tmp').filter(name => name.startsWith('kedgewise-')).map(name => join('/var/tmp', name)) : []]
+  for (const parent of parents.filter(existsSync)) {
+    for (const name of readdirSync(parent).filter(entry => entry.startsWith(prefix))) {
+      if (alive(Number(name.slice(prefix.length)))) continue
+      const left = join(parent, name)
+      if (bin) await succeeds(...as(join(bin, 'pg_ctl'), ['-D', join(left, 'data'), 'stop', '-m', 'immediate', '-w']))
+      rmSync(left, { recursive: true, force: true })
+    }
   }
 }
