@@ -15,7 +15,7 @@ export type * from './types'
 
 /** The seed of the demo world as everybody gets it. */
 export const worldSeed = 'merrowane-1'
-const continueChance = 0.35
+const continueChance = 0.5
 
 function designOf(slug: string): WorldDesign {
   const design = designs.find(d => d.slug === slug)

@@ -1,12 +1,12 @@
 import type { PullRecord } from '../../shared/types/holding'
 import type { World } from './types'
 
-/** The world's pulls as the fit takes them; fouled pulls enter nothing and are left out, those that never set have set false. */
+/** The world's pulls as the fit takes them, in order of day; fouled ones are handed over too, marked by their setting. */
 export function pullRecords(world: World): PullRecord[] {
   const familyOf = new Map(world.designs.map(d => [d.slug, d.family]))
   const trialOf = new Map(world.trials.map(t => [t.slug, t]))
   const rigOf = new Map(world.rigs.map(r => [r.slug, r]))
-  return world.pulls.filter(pull => pull.setting !== 'fouled').map((pull) => {
+  return world.pulls.map((pull) => {
     const family = familyOf.get(pull.design)
     const trial = trialOf.get(pull.trial)
     const rig = trial && rigOf.get(trial.rig)
@@ -20,10 +20,15 @@ export function pullRecords(world: World): PullRecord[] {
       massKg: pull.massKg,
       seabed: pull.seabed,
       ...(pull.modification === null ? {} : { modification: pull.modification }),
-      set: pull.setting !== 'neverSet',
+      set: pull.setting === 'set' || pull.setting === 'setAfterDragging',
       heldN: pull.heldN,
       movedN: pull.movedN,
       shankAngleDeg: trial.shankAngleDeg,
+      setting: pull.setting,
+      ...(pull.after === null ? {} : { after: pull.after }),
+      ...(pull.veerOutcome === null ? {} : { veer: pull.veerOutcome }),
+      ...(pull.fresh ? {} : { fresh: false }),
+      ...(pull.pair === null ? {} : { pair: pull.pair }),
     }
   })
 }

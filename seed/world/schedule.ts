@@ -95,8 +95,8 @@ export const coverage: Readonly<Record<PulledSeabed, Coverage>> = {
   },
   'weed-over-sand': {
     never: ['pellifrond', 'vennimore', 'skelloway', 'ebbwick', 'hobbrel', 'marrowby', 'yarrowmund'],
-    thin: ['orrelby'],
-    pulls: 3,
+    thin: ['orrelby', 'dunnavet'],
+    pulls: 4,
     restOne: false,
   },
 }

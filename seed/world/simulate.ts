@@ -9,7 +9,7 @@ import { randomStream } from './random'
 import { rig } from './trials'
 import { trueLnMedian, trueModificationRatio, trueNeverSetShare, trueTemper } from './truth'
 import { anchorDaySd, firstPullWeak, notFreshShare, pullSd, rigErrorLn } from './truth/holding'
-import { endShares, fouledShare, secondDropShare, setAfterDraggingShare } from './truth/setting'
+import { endShares, fouledShare, setAfterDraggingShare } from './truth/setting'
 
 /** Load at which a pull meant for turning is stopped, N: one of the thrust steps. */
 export const veerStopN = 1500
@@ -20,12 +20,11 @@ type Loads = Pick<WorldPull, 'heldN' | 'movedN' | 'end' | 'after' | 'creepRateMP
 /** Everything that one pull's fate depends on. */
 interface Case { trial: WorldTrial, plan: PlannedPull, design: WorldDesign, seabed: PulledSeabed, fresh: boolean, random: RandomStream, seed: string }
 
-function settingOf({ design, seabed, fresh, random }: Case): { setting: SettingOutcome, firstTry: boolean } {
-  if (!fresh) return { setting: 'set', firstTry: false }
-  if (random.chance(fouledShare)) return { setting: 'fouled', firstTry: false }
-  if (random.chance(trueNeverSetShare(design.slug, seabed))) return { setting: 'neverSet', firstTry: false }
-  const setting = random.chance(setAfterDraggingShare[seabed]) ? 'setAfterDragging' : 'set'
-  return { setting, firstTry: !random.chance(secondDropShare) }
+function settingOf({ design, seabed, fresh, random }: Case): SettingOutcome {
+  if (!fresh) return 'set'
+  if (random.chance(fouledShare)) return 'fouled'
+  if (random.chance(trueNeverSetShare(design.slug, seabed))) return 'neverSet'
+  return random.chance(setAfterDraggingShare[seabed]) ? 'setAfterDragging' : 'set'
 }
 
 /** The load in N that this pull would bear before it moves; weak marks a first pull that breaks out early. */
@@ -88,7 +87,7 @@ export function simulatePull(
   const seabed = trial.seabed as PulledSeabed
   const random = randomStream(`${seed}/pull/${trial.slug}/${order}`)
   const pull: Case = { trial, plan, design, seabed, fresh, random, seed }
-  const { setting, firstTry } = settingOf(pull)
+  const setting = settingOf(pull)
   const loads = setting === 'neverSet' || setting === 'fouled' ? unloaded : loadsOf(pull)
   const outcome = { family: design.family, seabed, setting, end: loads.end, heldN: loads.heldN }
   const condition = conditionOf(outcome, random)
@@ -102,7 +101,7 @@ export function simulatePull(
     pair: plan.pair,
     seabed,
     setting,
-    firstTry,
+    firstTry: fresh && setting === 'set',
     ...loads,
     attitude: attitudeOf(outcome, random),
     fouling: foulingOf(outcome, random),

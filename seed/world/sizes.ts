@@ -29,7 +29,7 @@ const lines: Readonly<Record<string, Line>> = {
   dunnavet: { masses: [6, 10, 14, 20, 28, 35], testMassKg: 20, shape: [318, 262, 60], strengthN: 1300, material: mild, finish: galvanised, stowsFlat: true, price: [35, 9] },
   skelloway: { masses: [5, 8, 12, 18, 25], testMassKg: 18, shape: [312, 250, 56], strengthN: null, material: mild, finish: galvanised, stowsFlat: true, price: [20, 6] },
   pellifrond: { masses: [5, 7, 10, 15, 21, 30], testMassKg: 10, shape: [428, 372, 78], strengthN: 1900, material: 'aluminium alloy', finish: 'anodised', stowsFlat: true, price: [140, 46] },
-  vennimore: { masses: [5, 8, 12, 18, 26], testMassKg: 12, shape: [410, 344, 74], strengthN: null, material: 'aluminium alloy', finish: 'bare', stowsFlat: true, price: [110, 38] },
+  vennimore: { masses: [5, 8, 12, 18, 29], testMassKg: 12, shape: [410, 344, 74], strengthN: null, material: 'aluminium alloy', finish: 'bare', stowsFlat: true, price: [110, 38] },
   cawdrith: { masses: [6, 10, 15, 20, 25, 33, 45], testMassKg: 20, shape: [286, 158, 186], strengthN: 2300, material: 'high-tensile steel', finish: galvanised, stowsFlat: false, price: [120, 15] },
   ulvesk: { masses: [6, 10, 15, 20, 27, 35, 50], testMassKg: 20, shape: [290, 150, 190], strengthN: 2100, material: 'high-tensile steel', finish: galvanised, stowsFlat: false, price: [110, 14] },
   hobbrel: { masses: [8, 12, 16, 21, 30], testMassKg: 21, shape: [282, 154, 202], strengthN: null, material: mild, finish: galvanised, stowsFlat: false, price: [60, 9] },

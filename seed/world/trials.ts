@@ -73,7 +73,7 @@ function trialOf([day, seabed, kind, depthM, chainLengthM]: ScheduledDay, seed: 
     place: place.name,
     latitudeDeg: Math.round(middle.latitudeDeg * 100 + place.north) / 100,
     longitudeDeg: Math.round(middle.longitudeDeg * 100 + place.east) / 100,
-    tester: tester.slug,
+    tester: tester.name,
     rig: rig.slug,
     seabed,
     procedure: procedures[kind],

@@ -61,6 +61,7 @@ export interface WorldTrial {
   place: string
   latitudeDeg: number
   longitudeDeg: number
+  /** name of the tester */
   tester: string
   rig: string
   seabed: NumberedSeabed
@@ -91,7 +92,7 @@ export interface WorldPull {
   pair: string | null
   seabed: NumberedSeabed
   setting: SettingOutcome
-  /** set at the first drop */
+  /** set at the first try, without dragging first */
   firstTry: boolean
   /** greatest step kept for the hold time, N; 0 where none was */
   heldN: number

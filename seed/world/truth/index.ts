@@ -2,7 +2,7 @@ import type { PulledSeabed } from './holding'
 import type { Family } from '../../../shared/types/words'
 import { anchorDaySd, exponents, firstPullWeak, medianKnAt20Kg, notFreshShare, pulledSeabeds, pullSd, rigErrorLn } from './holding'
 import { modificationRatios, modificationSeabeds } from './modifications'
-import { familyTemper, neverSetRange, reluctance, resetPenalty, secondDropShare } from './setting'
+import { familyTemper, neverSetRange, reluctance, resetPenalty, setAfterDraggingShare } from './setting'
 
 function lookUp<T>(table: Readonly<Record<string, T>>, key: string, what: string): T {
   const found = Object.hasOwn(table, key) ? table[key] : undefined
@@ -37,9 +37,9 @@ export function trueNeverSetShare(design: string, seabed: PulledSeabed): number 
   return low + (high - low) * lookUp(reluctance, design, 'design')
 }
 
-/** True share set at the first drop, of pulls that were not fouled. */
+/** True share set at the first try, without dragging, of pulls that were not fouled. */
 export function trueFirstTryShare(design: string, seabed: PulledSeabed): number {
-  return (1 - trueNeverSetShare(design, seabed)) * (1 - secondDropShare)
+  return (1 - trueNeverSetShare(design, seabed)) * (1 - lookUp(setAfterDraggingShare, seabed, 'seabed'))
 }
 
 /** What a family does after a breakout and in a veer pull, on a seabed. */

@@ -39,9 +39,8 @@ export const reluctance: Readonly<Record<string, number>> = {
   gorsetter: 0.2,
 }
 
-/** Share fouled, of all pulls; share set only at a second drop, of those that set; share that dragged before setting. */
+/** Share fouled, of all pulls; and share that dragged before setting, of those that set: the others set at the first try. */
 export const fouledShare = 0.015
-export const secondDropShare = 0.06
 export const setAfterDraggingShare: Readonly<Record<PulledSeabed, number>> = {
   'soft-mud': 0.12,
   'firm-mud': 0.10,
