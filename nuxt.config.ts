@@ -24,13 +24,9 @@ async function buildBeside(folder: string) {
 
 export default defineNuxtConfig({
   modules: ['@nuxt/eslint', '@nuxtjs/tailwindcss', '@pinia/nuxt', 'nuxt-auth-utils', 'nuxt-security'],
-  devtools: { enabled: false },
-  telemetry: false,
-  compatibilityDate: '2026-11-01',
-  future: { compatibilityVersion: 4 },
   // Components carry their folder's name (BoatFields -> <BoatFields> in components/boat/Fields.vue).
   imports: { dirs: [] },
-  css: ['~/assets/css/fonts.css'],
+  devtools: { enabled: false },
   app: {
     head: {
       htmlAttrs: { lang: 'en' },
@@ -42,13 +38,19 @@ export default defineNuxtConfig({
       link: [{ rel: 'icon', type: 'image/svg+xml', href: '/mark.svg' }],
     },
   },
+  css: ['~/assets/css/fonts.css'],
   vue: { runtimeCompiler: false },
-  experimental: { componentIslands: false, appManifest: false },
   runtimeConfig: {
     session: { name: 'kedgewise', maxAge: 90 * 24 * 3600, sessionHeader: false },
   },
-  tailwindcss: { cssPath: '~/assets/css/main.css', viewer: false },
-  eslint: { config: { standalone: false, stylistic: { semi: false, quotes: 'single' } } },
+  future: { compatibilityVersion: 4 },
+  experimental: { componentIslands: false, appManifest: false },
+  compatibilityDate: '2026-11-01',
+  nitro: {
+    preset: 'node-server',
+    esbuild: { options: { target: 'node20' } },
+    typescript: { tsConfig: { compilerOptions: { noUncheckedIndexedAccess: true } } },
+  },
   typescript: {
     strict: true,
     tsConfig: { compilerOptions: { noUncheckedIndexedAccess: true } },
@@ -57,6 +59,22 @@ export default defineNuxtConfig({
       include: ['../*.config.ts', '../tests/**/*.ts', '../seed/**/*.ts'],
     },
   },
+  telemetry: false,
+  hooks: {
+    'nitro:init': (nitro) => {
+      nitro.hooks.hook('compiled', async () => {
+        const { serverDir } = nitro.options.output
+        if (nitro.options.dev) return buildBeside(join(here, '.nuxt'))
+        await buildBeside(serverDir)
+        await cp(join(here, 'drizzle'), join(serverDir, 'drizzle'), { recursive: true })
+      })
+    },
+    'vite:extendConfig': (config) => {
+      // The hot-reload socket would otherwise listen on every interface.
+      if (isDev && config.server) Object.assign(config.server, { hmr: { host: '127.0.0.1' } })
+    },
+  },
+  eslint: { config: { stylistic: { semi: false, quotes: 'single', braceStyle: 'stroustrup', commaDangle: 'always-multiline' } } },
   security: {
     headers: {
       contentSecurityPolicy: {
@@ -91,23 +109,5 @@ export default defineNuxtConfig({
     csrf: false,
     removeLoggers: false,
   },
-  nitro: {
-    preset: 'node-server',
-    esbuild: { options: { target: 'node20' } },
-    typescript: { tsConfig: { compilerOptions: { noUncheckedIndexedAccess: true } } },
-  },
-  hooks: {
-    'nitro:init': (nitro) => {
-      nitro.hooks.hook('compiled', async () => {
-        const { serverDir } = nitro.options.output
-        if (nitro.options.dev) return buildBeside(join(here, '.nuxt'))
-        await buildBeside(serverDir)
-        await cp(join(here, 'drizzle'), join(serverDir, 'drizzle'), { recursive: true })
-      })
-    },
-    'vite:extendConfig': (config) => {
-      // The hot-reload socket would otherwise listen on every interface.
-      if (isDev && config.server) Object.assign(config.server, { hmr: { host: '127.0.0.1' } })
-    },
-  },
+  tailwindcss: { cssPath: '~/assets/css/main.css', viewer: false },
 })
