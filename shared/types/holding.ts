@@ -1,4 +1,4 @@
-import type { Family, NumberedSeabed } from './words'
+import type { Family, NumberedSeabed, PullAfter, SettingOutcome, VeerOutcome } from './words'
 
 /** One published pull as the fit takes it. Loads in N, horizontal at the anchor; angle of the shank in degrees. */
 export interface PullRecord {
@@ -19,6 +19,16 @@ export interface PullRecord {
   /** null: the rig's limit, or stopped early */
   movedN: number | null
   shankAngleDeg: number
+  /** how it set; without it `set` alone decides (true: at the first try). Fouled pulls enter nothing. */
+  setting?: SettingOutcome
+  /** what it did after breaking out; without it not tried */
+  after?: PullAfter
+  /** what it did when the load was turned; without it there was no veer pull */
+  veer?: VeerOutcome
+  /** false: made after a breakout in the same deployment; never counted as a pull of its own in fit or shares */
+  fresh?: boolean
+  /** links modified and unmodified pulls made back to back: same day, within 50 m, alternated */
+  pair?: string
 }
 
 /** Standard deviations of the model's random terms, in ln load. */

@@ -1,0 +1,55 @@
+import { checkModel } from '#shared/stats/mixedModel'
+import type { LogSds, MixedModel } from '#shared/stats/mixedModel'
+import { structureOf } from '#shared/stats/structure'
+import type { Structure } from '#shared/stats/structure'
+
+/** Everything a Laplace approximation works in: the model, its index lists, and the state at the last sds tried. */
+export interface Laplace {
+  model: MixedModel
+  structure: Structure
+  /** effects and day effects: the mode once `findMode` has returned */
+  x: Float64Array
+  w: Float64Array
+  /** per observation: first derivative, curvature (positive) and third derivative of the log likelihood by eta */
+  d1: Float64Array
+  curvature: Float64Array
+  d3: Float64Array
+  /** prior precision of each effect and of the day effects */
+  precision: Float64Array
+  dayPrecision: number
+  /** per day: curvature of its effect; per entry of dayCols: curvature between day and effect */
+  dayCurvature: Float64Array
+  cross: Float64Array
+  sigma: number
+}
+
+/** Makes the workspace of a model. @throws RangeError for a malformed model */
+export function makeLaplace(model: MixedModel): Laplace {
+  checkModel(model)
+  const structure = structureOf(model)
+  const n = model.lo.length
+  return {
+    model,
+    structure,
+    x: new Float64Array(model.group.length),
+    w: new Float64Array(model.days),
+    d1: new Float64Array(n),
+    curvature: new Float64Array(n),
+    d3: new Float64Array(n),
+    precision: new Float64Array(model.group.length),
+    dayPrecision: 0,
+    dayCurvature: new Float64Array(model.days),
+    cross: new Float64Array(structure.dayCols.length),
+    sigma: 1,
+  }
+}
+
+/** Takes over new standard deviations. */
+export function setSds(laplace: Laplace, logSds: LogSds): void {
+  const { model, precision } = laplace
+  model.group.forEach((group, col) => {
+    precision[col] = group < 0 ? 1 / model.priorSd[col]! ** 2 : Math.exp(-2 * logSds[group]!)
+  })
+  laplace.dayPrecision = model.dayGroup < 0 ? 0 : Math.exp(-2 * logSds[model.dayGroup]!)
+  laplace.sigma = Math.exp(logSds[model.groups]!)
+}

@@ -1,0 +1,66 @@
+import { makeSkyline } from '#shared/stats/skyline'
+import type { Skyline } from '#shared/stats/skyline'
+import type { MixedModel } from '#shared/stats/mixedModel'
+
+/** Index lists made once per model, so that each Newton step only adds numbers up. */
+export interface Structure {
+  /** observations of each day: order[dayStart[d]] to order[dayStart[d + 1]] */
+  dayStart: Int32Array
+  order: Int32Array
+  /** effects met on each day, rising: dayCols[dayColStart[d]] to ... */
+  dayColStart: Int32Array
+  dayCols: Int32Array
+  /** for each entry of model.cols the place of its effect in dayCols, -1 without a day */
+  slot: Int32Array
+  matrix: Skyline
+}
+
+function groupByDay(model: MixedModel): Pick<Structure, 'dayStart' | 'order'> {
+  const dayStart = new Int32Array(model.days + 1)
+  for (const day of model.day) if (day >= 0) dayStart[day + 1]!++
+  for (let d = 0; d < model.days; d++) dayStart[d + 1]! += dayStart[d]!
+  const next = dayStart.slice()
+  const order = new Int32Array(dayStart[model.days]!)
+  model.day.forEach((day, i) => {
+    if (day >= 0) order[next[day]!++] = i
+  })
+  return { dayStart, order }
+}
+
+function colsOf(model: MixedModel, observations: Iterable<number>): number[] {
+  const seen = new Set<number>()
+  for (const i of observations) {
+    for (let t = model.rowStart[i]!; t < model.rowStart[i + 1]!; t++) seen.add(model.cols[t]!)
+  }
+  return [...seen].sort((a, b) => a - b)
+}
+
+/** Lets every effect of a list reach back to the least of them. */
+function reach(first: Int32Array, cols: readonly number[]): void {
+  const least = cols[0]
+  if (least === undefined) return
+  for (const col of cols) first[col] = Math.min(first[col]!, least)
+}
+
+/** Builds the index lists and the empty matrix of a model. Effects of one block should stand together, shared ones last. */
+export function structureOf(model: MixedModel): Structure {
+  const { dayStart, order } = groupByDay(model)
+  const first = Int32Array.from(model.group, (_, col) => col)
+  const slot = new Int32Array(model.cols.length).fill(-1)
+  const dayColStart = new Int32Array(model.days + 1)
+  const dayCols: number[] = []
+  for (let d = 0; d < model.days; d++) {
+    const members = order.subarray(dayStart[d]!, dayStart[d + 1]!)
+    const cols = colsOf(model, members)
+    reach(first, cols)
+    for (const i of members) {
+      for (let t = model.rowStart[i]!; t < model.rowStart[i + 1]!; t++) slot[t] = dayCols.length + cols.indexOf(model.cols[t]!)
+    }
+    dayCols.push(...cols)
+    dayColStart[d + 1] = dayCols.length
+  }
+  model.day.forEach((day, i) => {
+    if (day < 0) reach(first, colsOf(model, [i]))
+  })
+  return { dayStart, order, dayColStart, dayCols: Int32Array.from(dayCols), slot, matrix: makeSkyline(first) }
+}
