@@ -42,54 +42,32 @@ export function forceCurve(spanM: (loadN: number) => number, slackM: number, mos
   return { loadsN, spansM, workJ }
 }
 
-/** Last node at or below a load, found by halving; never the very last node. */
-function nodeBelow(values: Float64Array, isBelow: (node: number) => boolean): number {
-  let low = 0
-  let high = values.length - 1
-  while (high - low > 1) {
-    const middle = (low + high) >> 1
-    if (isBelow(middle)) low = middle
-    else high = middle
-  }
-  return low
+/** Greatest load of a curve, N. */
+export function mostLoadN({ loadsN }: ForceCurve): number {
+  return loadsN[loadsN.length - 1] ?? 0
 }
 
-/**
- * Greatest load in a surge: the energy equals the integral of (H - H_s) dx from the steady load H_s to the peak.
- *
- * @param curve from forceCurve
- * @param steadyN steady horizontal load, N, 0 to 1e9
- * @param energyJ energy that the rode has to take up, J, 0 to 1e12
- * @returns peak horizontal load, N; null where it lies past the curve's greatest load
- * @throws FieldError outside these
- *
- * Source: energy balance, see the integral; any text of mechanics.
- */
-export function peakOn(curve: ForceCurve, steadyN: number, energyJ: number): number | null {
-  mustBeWithin('steadyN', steadyN, 0, 1e9)
-  mustBeWithin('energyJ', energyJ, 0, 1e12)
-  const { loadsN, spansM, workJ } = curve
-  const last = loadsN.length - 1
-  if (steadyN > (loadsN[last] ?? 0)) return null
-  const from = nodeBelow(loadsN, node => (loadsN[node] ?? 0) <= steadyN)
-  const start = pointAt(curve, from, steadyN)
-  const taken = (node: number) =>
-    Math.max(0, (workJ[node] ?? 0) - start.workJ - steadyN * ((spansM[node] ?? 0) - start.spanM))
-  if (energyJ > taken(last)) return null
-  const to = Math.max(from, nodeBelow(loadsN, node => node <= from || taken(node) <= energyJ))
-  const lowN = Math.max(steadyN, loadsN[to] ?? 0)
-  const leftJ = energyJ - (to > from ? taken(to) : 0)
-  const highN = loadsN[to + 1] ?? lowN
-  const giveMPerN = ((spansM[to + 1] ?? 0) - (spansM[to] ?? 0)) / (highN - (loadsN[to] ?? 0))
-  if (!(leftJ > 0)) return lowN
-  if (!(giveMPerN > 0)) return highN
-  return Math.min(highN, steadyN + Math.sqrt((lowN - steadyN) ** 2 + 2 * leftJ / giveMPerN))
-}
+/** A place on a curve: the node at or below it, its span in m and the work up to it in J. */
+export interface CurvePoint { node: number, spanM: number, workJ: number }
 
-function pointAt({ loadsN, spansM, workJ }: ForceCurve, node: number, loadN: number): { spanM: number, workJ: number } {
+/** The place on a curve at a load, N, 0 to the curve's greatest. */
+export function pointAt({ loadsN, spansM, workJ }: ForceCurve, loadN: number): CurvePoint {
+  const node = lastNode(loadsN.length, at => (loadsN[at] ?? 0) <= loadN)
   const lowN = loadsN[node] ?? 0
   const lowM = spansM[node] ?? 0
   const share = (loadN - lowN) / ((loadsN[node + 1] ?? lowN) - lowN)
   const giveM = share * ((spansM[node + 1] ?? lowM) - lowM)
-  return { spanM: lowM + giveM, workJ: (workJ[node] ?? 0) + (lowN + loadN) / 2 * giveM }
+  return { node, spanM: lowM + giveM, workJ: (workJ[node] ?? 0) + (lowN + loadN) / 2 * giveM }
+}
+
+/** Last node that a condition holds for, by halving; the first at least, the one before the last at most. */
+export function lastNode(count: number, holds: (node: number) => boolean): number {
+  let low = 0
+  let high = count - 1
+  while (high - low > 1) {
+    const middle = (low + high) >> 1
+    if (holds(middle)) low = middle
+    else high = middle
+  }
+  return low
 }

@@ -1,8 +1,10 @@
 import type { Rode } from '#shared/types/rode'
 import { mustBeWithin } from '#shared/utils/fieldError'
+import { breakingLoad } from './breakingLoad'
 import { solveRode, type RodeInput } from './catenary'
 import { elasticSpan } from './elasticSpan'
-import { forceCurve, peakOn } from './forceCurve'
+import { peakOn } from './energyPeak'
+import { forceCurve } from './forceCurve'
 import { giveOf, nothingLeft, type Give, type NoGive } from './give'
 import { solverInput } from './weights'
 
@@ -60,23 +62,4 @@ function readerOf(input: RodeInput, { stretch, breaking }: Give, hasSnubber: boo
     const peakN = peakOn(curve, steadyN, energyJ)
     return peakN === null ? broken : { peakN }
   }
-}
-
-/** Horizontal load at which the first part of known strength breaks, N, and that part; 0 where its own weight breaks it. */
-function breakingLoad(input: RodeInput, breaking: Give['breaking']): { mostN: number, part: string } {
-  const known = breaking.flatMap(({ part, breakingN }) => breakingN === null ? [] : [{ part, breakingN }])
-  const worst = (loadN: number) => {
-    const shape = solveRode({ ...input, horizontalLoadN: loadN })
-    const shares = known.map(({ part, breakingN }) =>
-      ({ part, share: (part === 'chain' ? shape.tensionJoinN : shape.tensionBowN) / breakingN }))
-    return shares.reduce((most, one) => one.share > most.share ? one : most, { part: '', share: 0 })
-  }
-  let low = 0
-  let high = Math.min(1e9, Math.max(1, ...known.map(({ breakingN }) => breakingN)))
-  for (let round = 0; round < 60 && high - low > 1e-9 * high; round += 1) {
-    const middle = (low + high) / 2
-    if (middle > 1e-6 && worst(middle).share > 1) high = middle
-    else low = middle
-  }
-  return { mostN: low, part: worst(Math.max(high, 1)).part }
 }
