@@ -16,6 +16,8 @@ export interface PlanDemand {
   surveyN: number
   upliftFactor: number
   survey: DemandPoint
+  /** survey demand at lesser winds that already lift the shank past the published angles */
+  lifted: readonly DemandPoint[]
   /** survey demand by gust speed, m/s */
   surveyByGust: DemandTable
   /** gust over mean at the plan's exposure */

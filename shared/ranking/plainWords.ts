@@ -17,6 +17,12 @@ export function inPercent(share: number): string {
   return percent > 99 ? 'more than 99 %' : `${percent.toFixed(0)} %`
 }
 
+/** A chance of 0 to 1, rounded down so that it never reads as a target it misses: 0.899 is `89 %`. */
+export function chanceInWords(chance: number): string {
+  if (chance < 0.01 || chance > 0.99) return inPercent(chance)
+  return `${Math.floor(100 * chance + 1e-9)} %`
+}
+
 /** A mass in kg with at most one decimal: `20 kg`, `12.5 kg`. */
 export function inKg(massKg: number): string {
   return `${Number(massKg.toFixed(1))} kg`

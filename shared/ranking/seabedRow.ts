@@ -1,6 +1,6 @@
 import type { DesignEstimate } from '#shared/types/holding'
 import type { RankedSeabed } from '#shared/types/ranking'
-import { designIndex, massFactor, predictAt } from '#shared/holding/predict'
+import { designIndex, massFactor, predictAt, type LnPrediction } from '#shared/holding/predict'
 import { normalCdf, z90 } from '#shared/stats/normal'
 import { holdingScore } from './chance'
 import { isNumberedMix, type MixSeabed, type NumberedMix, type RankContext } from './context'
@@ -15,6 +15,18 @@ export function scaledFrom(massRangeKg: DesignEstimate['massRangeKg'], massKg: n
   const [least, most] = massRangeKg
   if (massKg < 0.5 * least) return least
   return massKg > 2 * most ? most : null
+}
+
+/**
+ * Score of holding at the plan's wind, see holdingScore; no better than at any lesser wind. Past the published angles the
+ * uplift factor is so unsure that the score of an anchor unlikely to hold could rise with the wind: what drags in less
+ * does not hold in more (ours).
+ */
+export function planScore({ demand, variance }: RankContext, prediction: LnPrediction): number {
+  let score = holdingScore(prediction, demand.survey, variance)
+  if (score >= 0) return score
+  for (const point of demand.lifted) score = Math.min(score, holdingScore(prediction, point, variance))
+  return score
 }
 
 function withoutNumber({ seabed, share }: MixSeabed, upliftFactor: number): RankedSeabed {
@@ -51,7 +63,7 @@ export function rankSeabed(context: RankContext, entry: MixSeabed, design: strin
     share: entry.share,
     holdingN: { median: Math.exp(mean), low90: Math.exp(mean - half), high90: Math.exp(mean + half) },
     upliftFactor: demand.upliftFactor,
-    chance: normalCdf(holdingScore(prediction, demand.survey, variance)),
+    chance: normalCdf(planScore(context, prediction)),
     setShare: estimate.setShare,
     holdingWind: findHoldingWind(demand, prediction, variance, mostShownN),
     tableWindMs: findTableWind(demand, Math.exp(mean)),
@@ -77,7 +89,7 @@ export function judgeSize(context: RankContext, numbered: readonly NumberedMix[]
     const index = designIndex(fit, design)
     if (index < 0) return { massKg, chanceWorst: null, meetsTable: null }
     const prediction = predictAt(fit, index, massKg)
-    lowest = Math.min(lowest, holdingScore(prediction, context.demand.survey, context.variance))
+    lowest = Math.min(lowest, planScore(context, prediction))
     if (meets && !meetsTable(context.demand, prediction.mean)) meets = false
   }
   if (numbered.length === 0) return { massKg, chanceWorst: null, meetsTable: null }

@@ -4,7 +4,7 @@ import { predictLnHolding } from '#shared/holding/predict'
 import { anchoringVariance, demandPoint, holdingScore, loadSd, unboundedDemand } from '#shared/ranking/chance'
 import { chanceHigher } from '#shared/ranking/order'
 import { makeCovariance, makeEstimate, makeFit, makeSeabedFit } from '../../factories/fit'
-import { makeRandom } from '../../factories/random'
+import { randomNumbers } from '../../factories/randomNumbers'
 
 const deg = Math.PI / 180
 const fit = makeFit([])
@@ -22,7 +22,7 @@ describe('chance once set', () => {
   })
 
   it('agrees with drawing anchorings one by one', () => {
-    const { normal } = makeRandom(20)
+    const { normal } = randomNumbers(20)
     const seabed = makeSeabedFit('firm-mud', [makeEstimate('alder', 2500)], { covariance: makeCovariance([0.15], 0, 0.1, 0.004) })
     const prediction = predictLnHolding(seabed, 'alder', 30)
     const angle = 7 * deg
@@ -53,7 +53,7 @@ describe('chance once set', () => {
 
 describe('chance that one median is the higher', () => {
   it('agrees with drawing both from their joint posterior', () => {
-    const { normal } = makeRandom(3)
+    const { normal } = randomNumbers(3)
     const designs = [makeEstimate('alder', 2200), makeEstimate('birch', 2000)]
     const seabed = makeSeabedFit('loose-sand', designs, { covariance: makeCovariance([0.1, 0.15], 0.3) })
     const n = 200_000

@@ -4,7 +4,6 @@ import { solveRode, type RodeInput } from '#shared/rode/catenary'
 import { tabulateDemand } from '#shared/ranking/demand'
 import { tabulateAngle } from '#shared/ranking/rodeTable'
 import { greatestSpeed } from '#shared/ranking/speedSearch'
-import { tabulateSurge } from '#shared/ranking/surgeTable'
 
 const rodes: [string, Omit<RodeInput, 'horizontalLoadN'>][] = [
   ['chain, long', { heightM: 9.5, chain: { lengthM: 45, weightNPerM: 18.8 } }],
@@ -25,23 +24,6 @@ describe('tabulateAngle', () => {
   it('is flat where the rode never lifts, and refuses no range at all', () => {
     expect(tabulateAngle(() => 0, 1000)(500)).toBe(0)
     expect(() => tabulateAngle(() => 0, 1)).toThrow(/more than 1 N, got 1/)
-  })
-})
-
-describe('tabulateSurge', () => {
-  it('reads back a smooth surge and stops where the rode stops bounding it', () => {
-    const exact = (gustN: number) => gustN > 6000 ? null : 2500 / Math.sqrt(1 + gustN / 900)
-    const table = tabulateSurge(exact, 9000)
-    for (let gustN = 0; gustN < 5990; gustN += 37) {
-      expect(Math.abs((table(gustN) ?? Number.NaN) - (exact(gustN) ?? 0))).toBeLessThan(5)
-    }
-    expect(table(6001)).toBeNull()
-    expect(table(9000)).toBeNull()
-  })
-
-  it('is null throughout for a rode that bounds nothing', () => {
-    const table = tabulateSurge(() => null, 9000)
-    expect([table(0), table(500), table(9000)]).toEqual([null, null, null])
   })
 })
 
