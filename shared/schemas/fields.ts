@@ -11,7 +11,7 @@ export const saying = (what: string) => ({ error: (issue: Issue) => issue.input 
 /** A finite number in a closed interval, its unit ('' for none) in the message and in the description. */
 export function quantity(minimum: number, maximum: number, unit: string, description: string) {
   const words = saying(`a number between ${printed(minimum)} and ${printed(maximum)}${unit && ` ${unit}`}`)
-  return z.number(words).check(z.minimum(minimum, words), z.maximum(maximum, words), z.describe(unit ? `${description}, ${unit}` : description))
+  return z.number(words).check(z.minimum(minimum, words), z.maximum(maximum, words), z.describe(unit ? `${description} (${unit})` : description))
 }
 
 /** One of a closed list of words. */

@@ -4,7 +4,8 @@ import { fieldsOf, listOf, oneOf, quantity, saying, yesOrNo } from './fields'
 
 const sizeWords = saying('a size in inches such as 5/16')
 const sizeIn = z.string(sizeWords).check(
-  z.regex(/^(?:\d{1,2}|\d{1,2}\/\d{1,2}|\d{1,2}[ -]\d{1,2}\/\d{1,2})$/, sizeWords),
+  z.maxLength(20, sizeWords),
+  z.regex(/^(?:(?:\d{1,2}[ -])?\d{1,2}\/\d{1,2}|\d{1,2}|\d{0,2}\.\d{1,4}) ?(?:["″]|in)?$/, sizeWords),
   z.describe('Nominal size in inches, such as 5/16'),
 )
 const breakingN = quantity(1, 20_000_000, 'N', 'Breaking strength')

@@ -1,0 +1,20 @@
+import * as z from 'zod/mini'
+import { fieldsOf } from '../fields'
+import { flag, words } from './figures'
+
+/** The one error shape. */
+export const problem = fieldsOf({
+  statusCode: z.int(),
+  code: words('A word for programs'),
+  message: words('A sentence for people'),
+  fields: z.optional(z.record(z.string(), z.string()).check(z.describe('What is wrong with which field, by its dotted path'))),
+}, 'A refusal')
+
+export const aliveAnswer = fieldsOf({ alive: flag('The server answers') }, 'Alive')
+
+export const readyAnswer = fieldsOf({
+  ready: flag('All of the rest'),
+  database: flag('The database is reachable'),
+  migrated: flag('It has its tables'),
+  fit: flag('There is a fit to answer from'),
+}, 'Ready')
