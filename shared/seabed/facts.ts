@@ -19,7 +19,7 @@ export interface SeabedFacts {
   description: string
   /** how a chart after INT 1 section J would write it */
   notation: string
-  /** marks of its pattern, what lies on top first */
+  /** marks of its pattern, what lies on top first; the same mark twice is drawn denser; no two seabeds alike */
   patterns: readonly PatternKind[]
   cautions: readonly string[]
 }

@@ -30,7 +30,7 @@ export const numberedFacts: Readonly<Record<NumberedSeabed, SeabedFacts>> = {
     numbered,
     description: 'Mud stiff enough to come up in lumps on the chain. Most anchors set and bury in it, and it lets go slowly rather than at once.',
     notation: 'sfM',
-    patterns: ['dashes'],
+    patterns: ['dashes', 'dashes'],
     cautions: [mudCaution],
   },
   'stiff-clay': {
@@ -66,7 +66,7 @@ export const numberedFacts: Readonly<Record<NumberedSeabed, SeabedFacts>> = {
     numbered,
     description: 'Fine sand packed hard by current or surf. An anchor that gets its point in holds a great deal; many slide on their side and never do.',
     notation: 'hS',
-    patterns: ['stipple', 'hatch'],
+    patterns: ['stipple', 'stipple'],
     cautions: ['Many anchors never set here: the chance once set says nothing about those.'],
   },
   'thin-sand': {
@@ -84,7 +84,7 @@ export const numberedFacts: Readonly<Record<NumberedSeabed, SeabedFacts>> = {
     numbered,
     description: 'Small rounded stones that roll over each other. Points go in with a rattle, the heap in front of the fluke slides, and the anchor drags slowly without breaking out.',
     notation: 'G',
-    patterns: ['circles', 'stipple'],
+    patterns: ['circles'],
     cautions: [shiftCaution],
   },
   'cobble-over-sand': {

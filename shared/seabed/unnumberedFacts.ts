@@ -19,7 +19,7 @@ export const unnumberedFacts: Readonly<Record<UnnumberedSeabed, SeabedFacts>> = 
     numbered: false,
     description: 'A meadow of flowering plants rooted in a tough mat. Anchors tear it rather than bury in it, and a torn patch may take decades to grow back.',
     notation: 'Sg',
-    patterns: ['tufts', 'dashes'],
+    patterns: ['tufts', 'tufts'],
     cautions: [protectedCaution, noNumberCaution],
   },
   'rock': {
