@@ -9,8 +9,16 @@ export interface IntervalTerms {
   d1: number
   d2: number
   d3: number
-  /** derivative by ln of the scale (a and b shrink alike) */
+  /** derivatives by ln of the scale s, at a = (lo - m)/s and b = (hi - m)/s: of log once and twice, and of d1 and d2 */
   dLogScale: number
+  d2LogScale: number
+  d1ByLogScale: number
+  d2ByLogScale: number
+}
+
+/** A record to fill. */
+export function emptyTerms(): IntervalTerms {
+  return { log: 0, d1: 0, d2: 0, d3: 0, dLogScale: 0, d2LogScale: 0, d1ByLogScale: 0, d2ByLogScale: 0 }
 }
 
 /** Below this width, in standard deviations, the interval counts as an exact value: the error is its square over 24. */
@@ -26,6 +34,9 @@ function exact(a: number, b: number, out: IntervalTerms): void {
   out.d2 = -1
   out.d3 = 0
   out.dLogScale = middle * middle - 1
+  out.d2LogScale = -2 * middle * middle
+  out.d1ByLogScale = -middle
+  out.d2ByLogScale = 0
 }
 
 /** Fills ln D and the two ratios phi(a)/D, phi(b)/D for a + b >= 0, so that the upper tail is the small one. */
@@ -39,6 +50,7 @@ function upper(a: number, b: number): [log: number, p: number, q: number] {
   return [Math.log(d), Math.exp(logNormalDensity(a)) / d, Math.exp(logNormalDensity(b)) / d]
 }
 
+/** One-sided and far out: p = phi(a)/Q(a) is a + 1/a - 2/a^3 + ..., so p - a is taken from the series, not by subtraction. */
 function farOneSided(a: number, out: IntervalTerms, sign: number): void {
   const t = 1 / (a * a)
   const excess = (1 - t * (2 - 10 * t)) / a
@@ -48,6 +60,33 @@ function farOneSided(a: number, out: IntervalTerms, sign: number): void {
   out.d2 = -p * excess
   out.d3 = sign * 2 * t / a
   out.dLogScale = a * p
+  out.d2LogScale = -a * p * (1 + a * excess)
+  out.d1ByLogScale = -sign * a * p * excess
+  out.d2ByLogScale = 2 * t
+}
+
+function nothingKnown(out: IntervalTerms): void {
+  out.log = out.d1 = out.d2 = out.d3 = out.dLogScale = out.d2LogScale = out.d1ByLogScale = out.d2ByLogScale = 0
+}
+
+/** Everything from p = phi(a)/D and q = phi(b)/D, by the rules Ep = p(a - d1), Sp = p(a^2 - s) and alike for q. */
+function fill(log: number, a: number, b: number, p: number, q: number, out: IntervalTerms): void {
+  const [from, to] = [p === 0 ? 0 : a, q === 0 ? 0 : b]
+  const d1 = p - q
+  const s = p * from - q * to
+  const d2 = s - d1 * d1
+  const atA = from * from - s
+  const atB = to * to - s
+  const second = p * from * (atA - 1) - q * to * (atB - 1)
+  const d1Scale = p * atA - q * atB
+  out.log = log
+  out.d1 = d1
+  out.d2 = Math.min(d2, 0)
+  out.d3 = p * (from * (from - d1) - 1) - q * (to * (to - d1) - 1) - 2 * d1 * d2
+  out.dLogScale = s
+  out.d2LogScale = second
+  out.d1ByLogScale = d1Scale
+  out.d2ByLogScale = second - 2 * d1 * d1Scale
 }
 
 /**
@@ -73,22 +112,10 @@ export function intervalTerms(a: number, b: number, out: IntervalTerms): Interva
     return out
   }
   if (from === -Infinity) {
-    out.log = out.d1 = out.d2 = out.d3 = out.dLogScale = 0
+    nothingKnown(out)
     return out
   }
   const [log, near, far] = upper(from, to)
-  const p = flip ? far : near
-  const q = flip ? near : far
-  const pa = p === 0 ? 0 : p * a
-  const qb = q === 0 ? 0 : q * b
-  const d1 = p - q
-  const d2 = pa - qb - d1 * d1
-  const thirdA = p === 0 ? 0 : p * (a * a - a * d1 - 1)
-  const thirdB = q === 0 ? 0 : q * (b * b - b * d1 - 1)
-  out.log = log
-  out.d1 = d1
-  out.d2 = Math.min(d2, 0)
-  out.d3 = thirdA - thirdB - 2 * d1 * d2
-  out.dLogScale = pa - qb
+  fill(log, a, b, flip ? far : near, flip ? near : far, out)
   return out
 }

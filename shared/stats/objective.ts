@@ -1,8 +1,7 @@
-import { intervalTerms } from '#shared/stats/intervalTerms'
-import type { IntervalTerms } from '#shared/stats/intervalTerms'
+import { emptyTerms, intervalTerms } from '#shared/stats/intervalTerms'
 import type { Laplace } from '#shared/stats/laplace'
 
-const terms: IntervalTerms = { log: 0, d1: 0, d2: 0, d3: 0, dLogScale: 0 }
+const terms = emptyTerms()
 
 /**
  * Log likelihood plus log prior (up to a constant) at effects x and day effects w. Leaves the derivatives of each
