@@ -1,15 +1,16 @@
-import { ConfigurationError, readConfiguration } from '../utils/configuration'
+import { readConfiguration } from '../utils/configuration'
+import { readLimits } from '../utils/limits'
 import { log } from '../utils/log'
 import { migrationsFolder } from '../utils/places'
 import { startApplication, stopApplication } from '../services/application'
 
 function configurationOrExit() {
   try {
+    readLimits(process.env)
     return readConfiguration(process.env)
   }
   catch (error) {
-    if (!(error instanceof ConfigurationError)) throw error
-    console.error(error.message)
+    console.error((error as Error).message)
     process.exit(1)
   }
 }

@@ -1,0 +1,2 @@
+export function printTable(title: string, rows: Record<string, string | number>[]): void
+export function median(values: readonly number[]): number
