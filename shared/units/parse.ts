@@ -69,7 +69,7 @@ function readBeaufort(text: string): Understood | NotUnderstood | null {
 }
 
 function readFeetInches(text: string): Understood | NotUnderstood | null {
-  const match = /^(\d{1,6}) ?(?:'|ft\.?|feet|foot) ?(\d.*?) ?(?:"|in\.?|inch|inches)?$/i.exec(text)
+  const match = /^(\d{1,6}) ?(?:'|ft\.?|feet|foot)[ -]?(\d.*?) ?(?:"|in\.?|inch|inches)?$/i.exec(text)
   if (!match) return null
   const inches = readNumber(match[2] ?? '')
   if (!inches || inches.rest !== '') return null

@@ -22,7 +22,7 @@ describe('parseQuantity reads', () => {
   // Foot, inch and pound by the 1959 agreement; the nautical mile of 1852 m.
   it.each([
     ['35ft', 'length', 10.668], ['35\' 2"', 'length', 10.7188], ['35\' 2 1/2"', 'length', 10.7315], ['35’ 2½”', 'length', 10.7315],
-    ['35\'2', 'length', 10.7188], ['35 ft 2 in.', 'length', 10.7188], ['35\'', 'length', 10.668], ['35\'\'', 'length', 0.889], ['35½ ft', 'length', 10.8204],
+    ['35\'2', 'length', 10.7188], ['35\'-2"', 'length', 10.7188], ['35 ft 2 in.', 'length', 10.7188], ['35\'', 'length', 10.668], ['35\'\'', 'length', 0.889], ['35½ ft', 'length', 10.8204],
     ['11,2 m', 'length', 11.2], ['11.2', 'length', 11.2], ['  11. ', 'length', 11], ['11. m', 'length', 11], ['.5 m', 'length', 0.5], [',5 m', 'length', 0.5],
     ['1,200 kg', 'mass', 1200], ['4.5 t', 'mass', 4500], ['4,5t', 'mass', 4500], ['9900 lbs', 'mass', 4490.564463],
     ['30 kn', 'speed', 15.4333333333], ['30 KTS', 'speed', 15.4333333333], ['15 m/s', 'speed', 15], ['15 m s⁻¹', 'speed', 15], ['55 km / h', 'speed', 15.2777777778],
