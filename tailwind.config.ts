@@ -22,5 +22,21 @@ export default {
       serif: ['Lora', 'Georgia', 'serif'],
       sans: ['"Source Sans 3"', 'system-ui', 'sans-serif'],
     },
+    // The six sizes of the book: nothing is set in any other.
+    fontSize: {
+      label: ['0.8125rem', { lineHeight: '1.35' }],
+      table: ['0.9375rem', { lineHeight: '1.45' }],
+      prose: ['1.0625rem', { lineHeight: '1.62' }],
+      lead: ['1.3125rem', { lineHeight: '1.4' }],
+      sentence: ['1.6875rem', { lineHeight: '1.75' }],
+      title: ['2.5rem', { lineHeight: '1.15' }],
+    },
+    borderRadius: { none: '0' },
+    boxShadow: { none: 'none' },
+    extend: {
+      maxWidth: { measure: '38rem', page: '72rem' },
+      borderWidth: { rule: 'var(--rule)' },
+      minHeight: { touch: '2.75rem' },
+    },
   },
 } satisfies Config
