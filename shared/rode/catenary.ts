@@ -1,6 +1,6 @@
 import { FieldError, mustBeWithin } from '#shared/utils/fieldError'
 import type { RodeRegime } from '#shared/types/rode'
-import { clearSlope, type ScaledRode } from './clear'
+import { clearSlope, spareLength, type ScaledRode } from './clear'
 import { liftedChain, liftedLength } from './grounded'
 import { riseOver, spanOver } from './segment'
 
@@ -98,8 +98,9 @@ function checkRode({ heightM, horizontalLoadN, chain, rope }: RodeInput): void {
     mustBeWithin('rope.lengthM', rope.lengthM, 0, 1e6)
     mustBeWithin('rope.submergedWeightNPerM', rope.weightNPerM, 0, 1e5)
   }
-  const lengthM = chain.lengthM + (rope?.lengthM ?? 0)
-  if (lengthM <= heightM) {
+  const ropeM = rope?.lengthM ?? 0
+  if (spareLength(heightM, chain.lengthM, ropeM) <= 0) {
+    const lengthM = chain.lengthM + ropeM
     const field = rope ? 'rope.lengthM' : 'chain.lengthM'
     throw new FieldError(field, `too short to reach the bottom: ${lengthM} m of rode, the height is ${heightM} m`)
   }

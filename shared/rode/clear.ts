@@ -9,6 +9,11 @@ export interface ScaledRode {
   ropePull: number
 }
 
+/** What a rode is longer than its height, m: exact however little it is, since the longer part is over half the height. */
+export function spareLength(heightM: number, chainM: number, ropeM: number): number {
+  return Math.max(chainM, ropeM) - heightM + Math.min(chainM, ropeM)
+}
+
 /**
  * Slope of the rode at the shank (vertical over horizontal force) when no part of it lies on the bottom.
  *
@@ -23,7 +28,7 @@ export interface ScaledRode {
  */
 export function clearSlope(rode: ScaledRode): number {
   const { heightM, chainM, chainPull, ropeM, ropePull } = rode
-  const spareM = chainM + ropeM - heightM
+  const spareM = spareLength(heightM, chainM, ropeM)
   const chord = heightM / Math.sqrt(spareM * (chainM + ropeM + heightM))
   let low = Math.max(0, chord - chainPull - ropePull)
   let high = chord

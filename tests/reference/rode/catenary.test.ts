@@ -56,6 +56,32 @@ describe('rode shapes with known answers', () => {
   })
 })
 
+interface Extreme extends RodeInput { note: string, expected: Record<string, number> }
+const { cases: extremes } = JSON.parse(readFileSync(new URL('./extremes.json', import.meta.url), 'utf8')) as { cases: Extreme[] }
+
+// Source: shapes.py, the closed form in 50 decimal digits.
+describe('extreme shapes', () => {
+  it.each(extremes.map(one => [one.note, one] as const))('%s', (_note, { note: _, expected, ...input }) => {
+    const shape = solveRode(input)
+    const rodeM = input.chain.lengthM + (input.rope?.lengthM ?? 0)
+    const loadN = figure(expected, 'tensionBowN')
+    const errors = {
+      chain: (shape.groundedChainM - figure(expected, 'chainOnSeabedM')) / rodeM,
+      rope: (shape.groundedRopeM - figure(expected, 'ropeOnSeabedM')) / rodeM,
+      span: shape.spanM / figure(expected, 'spanM') - 1,
+      bow: shape.tensionBowN / loadN - 1,
+      anchor: shape.tensionAnchorN / figure(expected, 'tensionAnchorN') - 1,
+      upAnchor: (shape.verticalAnchorN - figure(expected, 'verticalAnchorN')) / figure(expected, 'tensionAnchorN'),
+      upBow: (shape.verticalBowN - figure(expected, 'verticalBowN')) / loadN,
+    }
+    for (const [name, error] of Object.entries(errors)) expect(Math.abs(error), name).toBeLessThan(1e-9)
+  })
+
+  it('reads fourteen', () => {
+    expect(extremes).toHaveLength(14)
+  })
+})
+
 // Source: MIT course 2.019, Design of Ocean Systems, lecture on mooring: T 1510 kN at the fairlead, w 828 N/m, h 25 m;
 // the least line that leaves the pull on the anchor flat is h sqrt(2 T / (w h) - 1) = 300.93 m.
 describe('least length of a mooring line', () => {

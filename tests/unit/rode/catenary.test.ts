@@ -2,7 +2,7 @@ import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
 import { solveRode, type RodeInput, type RodeShape } from '#shared/rode/catenary'
 import { rodeCurve } from '#shared/rode/curve'
-import { FieldError } from '#shared/utils/fieldError'
+import type { FieldError } from '#shared/utils/fieldError'
 import { integratePart } from './quadrature'
 
 const decades = (low: number, high: number) =>
@@ -107,13 +107,9 @@ describe('solveRode', () => {
     ['floating rope', 'rope.submergedWeightNPerM', /got -0.1/, { ...good, rope: { lengthM: 40, weightNPerM: -0.1 } }],
     ['endless rope', 'rope.lengthM', /got Infinity/, { ...good, rope: { lengthM: Number.POSITIVE_INFINITY, weightNPerM: 0 } }],
   ])('refuses %s', (_name, field, message, rode) => {
+    expect(() => solveRode(rode)).toThrow(RangeError)
     expect(() => solveRode(rode)).toThrow(message)
-    try {
-      solveRode(rode)
-    } catch (error) {
-      expect(error).toBeInstanceOf(RangeError)
-      expect((error as FieldError).field).toBe(field)
-    }
+    expect(() => solveRode(rode)).toThrow(expect.objectContaining<Partial<FieldError>>({ field }))
   })
 })
 
@@ -127,8 +123,7 @@ describe('rodeCurve', () => {
       let lengthM = 0
       curve.slice(1).forEach(([x, y], index) => {
         const [x0, y0] = curve[index] ?? [0, 0]
-        expect(x).toBeGreaterThanOrEqual(x0 - 1e-9 * shape.spanM)
-        expect(y).toBeGreaterThanOrEqual(y0 - 1e-9 * rode.heightM)
+        if (x < x0 - 1e-9 * shape.spanM || y < y0 - 1e-9 * rode.heightM) expect.fail(`turns back at [${x}, ${y}]`)
         lengthM += Math.hypot(x - x0, y - y0)
       })
       const wholeM = rode.chain.lengthM + (rode.rope?.lengthM ?? 0)
