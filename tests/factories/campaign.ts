@@ -18,9 +18,11 @@ export interface CampaignPlan {
   /** share of pulls made with a modified anchor, in back-to-back pairs */
   modifiedShare?: number
   sds?: Partial<HoldingSds & { sigma: number }>
-  /** rigs: calibration sd, and greatest load, N */
+  /** number of rigs, each with a calibration error of sd 0.10; 0: none named, no error */
   rigs?: number
+  /** greatest load of the rig, and its first step, N */
   limitN?: number
+  firstN?: number
   /** width of a load step as a factor; loads are powers of it */
   step?: number
   massesKg?: readonly number[]
@@ -56,10 +58,9 @@ function effects(random: RandomNumbers): (key: string, sd: number) => number {
 }
 
 /** The step a holding falls in: loads rise by a factor up to the rig's limit. */
-function stepped(holdingN: number, step: number, limitN: number): Pick<PullRecord, 'heldN' | 'movedN'> {
-  const first = 300
-  if (holdingN < first) return { heldN: 0, movedN: first }
-  let heldN = first
+function stepped(holdingN: number, step: number, limitN: number, firstN: number): Pick<PullRecord, 'heldN' | 'movedN'> {
+  if (holdingN < firstN) return { heldN: 0, movedN: firstN }
+  let heldN = firstN
   while (heldN * step <= holdingN && heldN * step <= limitN) heldN *= step
   return { heldN, movedN: heldN * step > limitN ? null : heldN * step }
 }
@@ -74,7 +75,7 @@ export function simulateCampaign(plan: CampaignPlan): Campaign {
   const random = randomNumbers(plan.seed)
   const sds = { ...campaignSds, ...plan.sds }
   const effect = effects(random)
-  const { step = 1.18, limitN = 4500, massesKg = [15, 20, 25], anglesDeg = [0], rigs = 1, modifiedShare = 0 } = plan
+  const { step = 1.18, limitN = 4500, firstN = 300, massesKg = [15, 20, 25], anglesDeg = [0], rigs = 1, modifiedShare = 0 } = plan
   const designs = Array.from({ length: plan.designs }, (_, d) => ({ design: `d${d}`, family: familyNames[d % plan.families]! }))
   const truth = new Map<string, number>()
   for (const seabed of plan.seabeds) {
@@ -87,7 +88,7 @@ export function simulateCampaign(plan: CampaignPlan): Campaign {
   }
   const pulls = plan.seabeds.flatMap(seabed => Array.from({ length: plan.trialsPerSeabed }, (_, t) => {
     const trial = `${seabed}-${t}`
-    const rig = `rig${t % rigs}`
+    const rig = rigs > 0 ? `rig${t % rigs}` : undefined
     const shankAngleDeg = anglesDeg[t % anglesDeg.length]!
     return pick(random, plan.designsPerTrial, designs.length).flatMap((index) => {
       const { design, family } = designs[index]!
@@ -100,10 +101,10 @@ export function simulateCampaign(plan: CampaignPlan): Campaign {
         const ln = truth.get(truthKey(design, seabed))! + tau
           + (sizeExponent(seabed) + effect(`beta ${seabed}`, 0.05)) * Math.log(massKg / 15)
           + Math.log(upliftFactor(shankAngleDeg * Math.PI / 180))
-          + effect(`u ${trial}`, sds.trial) + effect(`w ${trial} ${design}`, sds.anchorDay) + effect(`v ${rig}`, 0.1)
+          + effect(`u ${trial}`, sds.trial) + effect(`w ${trial} ${design}`, sds.anchorDay) + (rig === undefined ? 0 : effect(`v ${rig}`, 0.1))
           + sds.sigma * random.normal()
         return {
-          trial, rig, design, family, massKg, seabed, set: true, shankAngleDeg, ...stepped(Math.exp(ln), step, limitN),
+          trial, ...(rig === undefined ? {} : { rig }), design, family, massKg, seabed, set: true, shankAngleDeg, ...stepped(Math.exp(ln), step, limitN, firstN),
           ...(modifiedShare > 0 ? { pair: `${index}-${p >> 1}` } : {}), ...(modified ? { modification: 'blunted-edge' } : {}),
         }
       })
