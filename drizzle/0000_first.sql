@@ -4,6 +4,7 @@ CREATE TABLE "designs" (
 	"name" text NOT NULL,
 	"family" text NOT NULL,
 	"description" text DEFAULT '' NOT NULL,
+	"settings" text[] DEFAULT '{}' NOT NULL,
 	"invented" boolean DEFAULT false NOT NULL,
 	CONSTRAINT "designs_slug_unique" UNIQUE("slug"),
 	CONSTRAINT "designs_slug_form" CHECK ("designs"."slug" ~ '^[a-z0-9]+(-[a-z0-9]+)*$')
@@ -144,6 +145,7 @@ CREATE TABLE "trials" (
 	"wave_height_m" double precision,
 	"sea_state" text DEFAULT '' NOT NULL,
 	"procedure" text DEFAULT '' NOT NULL,
+	"note" text DEFAULT '' NOT NULL,
 	"rode" jsonb NOT NULL,
 	"published_at" timestamp with time zone,
 	"invented" boolean DEFAULT false NOT NULL,

@@ -18,7 +18,7 @@ async function writeCatalogue(tx: Transaction, world: World) {
     ({ slug, soil, numbered, name: seabedFacts(slug).name })))
   await tx.insert(families).values(world.families)
   const designId = idsBySlug(await tx.insert(designs)
-    .values(world.designs.map(({ slug, name, family, description, invented }) => ({ slug, name, family, description, invented })))
+    .values(world.designs.map(({ slug, name, family, description, settings, invented }) => ({ slug, name, family, description, settings, invented })))
     .returning({ id: designs.id, slug: designs.slug }))
   const rows = await tx.insert(sizes).values(world.sizes.map(({ design, currency, priceDate, ...facts }) =>
     ({ ...facts, designId: designId(design), priceCurrency: currency, priceOn: priceDate })))
@@ -34,13 +34,13 @@ async function writeCatalogue(tx: Transaction, world: World) {
 
 async function writeTrials(tx: Transaction, world: World) {
   const rigId = idsBySlug(await tx.insert(rigs).values(world.rigs.map(rig => ({
-    slug: rig.slug, name: rig.name, vessel: rig.vessel, method: rig.calibrationMethod, limitN: rig.limitN, stepsN: rig.thrustStepsN,
+    slug: rig.slug, name: rig.name, vessel: rig.vessel, limitN: rig.limitN, stepsN: rig.thrustStepsN,
     holdS: rig.holdTimeS, calibratedOn: rig.calibrationDate, calibrationMethod: rig.calibrationMethod, calibrationSd: rig.calibrationSd, invented: true,
   }))).returning({ id: rigs.id, slug: rigs.slug }))
   return idsBySlug(await tx.insert(trials).values(world.trials.map(trial => ({
     slug: trial.slug, rigId: rigId(trial.rig), tester: trial.tester, day: trial.day, place: `${trial.place}, ${trial.sound}`,
     latitudeDeg: trial.latitudeDeg, longitudeDeg: trial.longitudeDeg, depthM: trial.depthM, windMs: trial.windMs, windFrom: trial.windFrom,
-    currentMs: trial.currentMs, waveHeightM: trial.waveHeightM, seaState: trial.seaState, procedure: trial.procedure,
+    currentMs: trial.currentMs, waveHeightM: trial.waveHeightM, seaState: trial.seaState, procedure: trial.procedure, note: trial.note,
     rode: { chainLengthM: trial.chainLengthM, chainDiameterMm: trial.chainMm, bowHeightM: trial.bowHeightM },
     publishedAt: `${trial.day}T18:00:00Z`, invented: true,
   }))).returning({ id: trials.id, slug: trials.slug }))

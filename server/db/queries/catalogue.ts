@@ -23,6 +23,7 @@ export interface ListedDesign {
   family: Family
   familyName: string
   description: string
+  settings: string[]
   invented: boolean
   sizes: ListedSize[]
 }

@@ -25,6 +25,8 @@ export const designs = pgTable('designs', {
   name: text().notNull(),
   family: text().notNull().references(() => families.slug),
   description: text().notNull().default(''),
+  /** fluke settings that its maker provides; empty: none */
+  settings: text().array().notNull().default([]),
   /** true for the demo world's designs: the pages say so */
   invented: boolean().notNull().default(false),
 }, table => [isSlug('designs_slug_form', table.slug)])

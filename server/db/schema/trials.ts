@@ -49,6 +49,7 @@ export const trials = pgTable('trials', {
   waveHeightM: quantity('wave_height_m'),
   seaState: text('sea_state').notNull().default(''),
   procedure: text().notNull().default(''),
+  note: text().notNull().default(''),
   rode: jsonb().$type<TrialRode>().notNull(),
   publishedAt: moment('published_at'),
   invented: boolean().notNull().default(false),
