@@ -86,9 +86,9 @@ export function toProblem(error: unknown): { problem: Problem, headers: Record<s
   return { problem: { statusCode: 500, code: 'internal', message: 'Something went wrong on our side' }, headers: {} }
 }
 
-/** Writes down what the client is not told. */
+/** Writes down what the client is not told; a refusal of our own, such as "no fit yet", has told all there is. */
 export function logFailure(error: unknown, problem: Problem, request: { id: string, method: string, path: string }): void {
-  if (problem.statusCode < 500) return
+  if (problem.statusCode < 500 || chain(error).some(link => link instanceof ApiError)) return
   const root = chain(error).findLast(link => link instanceof Error)
   log.error('a request failed', { ...request, status: problem.statusCode, error: root instanceof Error ? root.stack ?? root.message : String(error) })
 }

@@ -5,9 +5,9 @@ import { count, list, words } from './figures'
 
 const constituent = fieldsOf({
   noun: words('As printed'),
-  natsur: words('S-57 nature of surface'),
+  natsur: z.nullable(count('Code of the nature of surface, S-57 NATSUR')),
   qualifiers: list(z.string(), 'As printed'),
-  natqua: list(z.string(), 'S-57 qualifying terms'),
+  natqua: list(z.int(), 'Codes of the qualifying terms, S-57 NATQUA'),
 }, 'One constituent')
 
 export const notationAnswer = fieldsOf({

@@ -1,0 +1,39 @@
+import { describe, expectTypeOf, it } from 'vitest'
+import type * as z from 'zod/mini'
+import type { designsAnswer, estimatesAnswer, seabedsAnswer } from '#shared/schemas/answers/catalogue'
+import type { fitAnswer } from '#shared/schemas/answers/fit'
+import type { loadAnswer } from '#shared/schemas/answers/load'
+import type { notationAnswer } from '#shared/schemas/answers/notation'
+import type { rankingAnswer } from '#shared/schemas/answers/ranking'
+import type { rodeAnswer } from '#shared/schemas/answers/rode'
+import type { fitRequest } from '#shared/schemas/fit'
+import type { loadRequest } from '#shared/schemas/load'
+import type { rankingRequest } from '#shared/schemas/ranking'
+import type { rodeRequest } from '#shared/schemas/rode'
+import type { readChartNotation } from '#shared/seabed/notation'
+import type { DesignsAnswer, EstimatesAnswer, SeabedsAnswer } from '#shared/types/catalogue'
+import type { FitAnswer, FitRequest } from '#shared/types/fit'
+import type { LoadAnswer, LoadRequest } from '#shared/types/load'
+import type { RankingAnswer, RankingRequest } from '#shared/types/ranking'
+import type { RodeAnswer, RodeRequest } from '#shared/types/rode'
+
+// Checked by the compiler, not at run time: `npm run typecheck` fails where a schema and its type drift apart.
+describe('schemas and types say the same', () => {
+  it('of what is asked', () => {
+    expectTypeOf<z.output<typeof loadRequest>>().toEqualTypeOf<LoadRequest>()
+    expectTypeOf<z.output<typeof rodeRequest>>().toEqualTypeOf<RodeRequest>()
+    expectTypeOf<z.output<typeof rankingRequest>>().toEqualTypeOf<RankingRequest>()
+    expectTypeOf<z.output<typeof fitRequest>>().toEqualTypeOf<FitRequest>()
+  })
+
+  it('of what is answered', () => {
+    expectTypeOf<z.output<typeof loadAnswer>>().toEqualTypeOf<LoadAnswer>()
+    expectTypeOf<z.output<typeof rodeAnswer>>().toEqualTypeOf<RodeAnswer>()
+    expectTypeOf<z.output<typeof rankingAnswer>>().toEqualTypeOf<RankingAnswer>()
+    expectTypeOf<z.output<typeof fitAnswer>>().toEqualTypeOf<FitAnswer>()
+    expectTypeOf<z.output<typeof notationAnswer>>().toEqualTypeOf<ReturnType<typeof readChartNotation>>()
+    expectTypeOf<z.output<typeof designsAnswer>>().toEqualTypeOf<DesignsAnswer>()
+    expectTypeOf<z.output<typeof seabedsAnswer>>().toEqualTypeOf<SeabedsAnswer>()
+    expectTypeOf<z.output<typeof estimatesAnswer>>().toEqualTypeOf<EstimatesAnswer>()
+  })
+})
