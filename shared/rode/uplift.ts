@@ -1,6 +1,6 @@
 /** The share of holding left when the rode lifts the shank, and how unsure that share is. */
 
-const degree = Math.PI / 180
+import { DEG_RAD } from '#shared/units/constants'
 
 /** The published angles and shares, and beyond them our own line down to 0.10 at 25 degrees. */
 const shares: readonly (readonly [angleDeg: number, share: number])[] = [
@@ -8,7 +8,7 @@ const shares: readonly (readonly [angleDeg: number, share: number])[] = [
 ]
 
 /** Greatest shank angle of the published series, rad: past it the factor is our extrapolation and a warning is due. */
-export const publishedUpliftLimitRad = 15 * degree
+export const publishedUpliftLimitRad = 15 * DEG_RAD
 
 function checkAngle(angleRad: number): void {
   if (!(angleRad >= 0 && angleRad <= Math.PI / 2)) {
@@ -30,7 +30,7 @@ function checkAngle(angleRad: number): void {
  */
 export function upliftFactor(angleRad: number): number {
   checkAngle(angleRad)
-  const angleDeg = angleRad / degree
+  const angleDeg = angleRad / DEG_RAD
   let [fromDeg, fromShare] = shares[0] ?? [0, 1]
   for (const [toDeg, toShare] of shares) {
     if (angleDeg <= toDeg) {
@@ -53,5 +53,5 @@ export function upliftFactor(angleRad: number): number {
  */
 export function upliftSd(angleRad: number): number {
   const factor = upliftFactor(angleRad)
-  return 0.1 * Math.min(angleRad / (5 * degree), 1) / factor
+  return 0.1 * Math.min(angleRad / (5 * DEG_RAD), 1) / factor
 }
