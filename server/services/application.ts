@@ -2,13 +2,13 @@ import type PgBoss from 'pg-boss'
 import { connect, type Connection } from '../db/client'
 import { applyMigrations } from '../db/migrate'
 import { newestFitId } from '../db/queries/fits'
-import { hasTables, ping } from '../db/queries/health'
+import { ping } from '../db/queries/health'
 import { openQueue, queues, startQueue } from '../jobs/queue'
 import { log } from '../utils/log'
 import { startEvidence, stopEvidence } from './evidence'
 import { refit } from './refit'
 
-interface Application { connection: Connection, boss: PgBoss | null, stopping: AbortController }
+interface Application { connection: Connection, boss: PgBoss | null, migrated: boolean, stopping: AbortController }
 
 let application: Application | null = null
 
@@ -35,6 +35,7 @@ async function begin(url: string, migrations: string, app: Application): Promise
   while (!app.stopping.signal.aborted) {
     try {
       await applyMigrations(url, migrations)
+      app.migrated = true
       app.boss = await startJobs(url, app)
       startEvidence(app.connection.db, url)
       return
@@ -50,7 +51,7 @@ async function begin(url: string, migrations: string, app: Application): Promise
 /** Starts what a server needs besides its routes. `failed` is called when the database refuses the migrations. */
 export function startApplication(url: string, migrations: string, failed: (error: Error) => void): void {
   const connection = connect(url, { onError: error => log.warn('a database connection was lost', { error: error.message }) })
-  application = { connection, boss: null, stopping: new AbortController() }
+  application = { connection, boss: null, migrated: false, stopping: new AbortController() }
   begin(url, migrations, application).catch(failed)
 }
 
@@ -78,7 +79,7 @@ export async function readiness(): Promise<Readiness> {
   try {
     await ping(database())
     state.database = true
-    state.migrated = await hasTables(database())
+    state.migrated = application?.migrated ?? false
     state.fit = state.migrated && await newestFitId(database()) !== null
   }
   catch { /* what was not reached stays false */ }
