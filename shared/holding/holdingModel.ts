@@ -52,10 +52,11 @@ function numbered(keys: readonly string[]): Map<string, number> {
 function sparseRows(rows: readonly Effect[][], columnOf: Map<string, number>): Pick<MixedModel, 'rowStart' | 'cols' | 'coefs'> {
   const rowStart = new Int32Array(rows.length + 1)
   rows.forEach((row, i) => (rowStart[i + 1] = rowStart[i]! + row.length))
-  const effects = rows.flat()
+  const col = (effect: Effect): number => columnOf.get(effect.key)!
+  const effects = rows.flatMap(row => [...row].sort((a, b) => col(a) - col(b)))
   return {
     rowStart,
-    cols: Int32Array.from(effects, effect => columnOf.get(effect.key)!),
+    cols: Int32Array.from(effects, col),
     coefs: Float64Array.from(effects, effect => effect.coefficient),
   }
 }

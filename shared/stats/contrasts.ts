@@ -1,4 +1,3 @@
-import { solveForward } from '#shared/stats/skyline'
 import type { Laplace } from '#shared/stats/laplace'
 
 /**
@@ -15,20 +14,45 @@ export interface UnseenEffect { id: number, group: number, knownSd: number }
 /** Posterior mean and covariance (row-major) of a list of contrasts. */
 export interface Moments { mean: Float64Array, covariance: Float64Array }
 
-function forward(laplace: Laplace, contrast: Contrast): Float64Array {
-  const y = new Float64Array(laplace.x.length)
-  for (const col of contrast.cols) y[col]! += 1
-  solveForward(laplace.structure.matrix, y)
-  return y
+/** L^-1 y in place, column by column, so that only places which hold something are worked on. */
+function solveSparse(laplace: Laplace, y: Float64Array): void {
+  const { matrix, columnRows } = laplace.structure
+  for (let j = 0; j < y.length; j++) {
+    if (y[j] === 0) continue
+    const value = y[j]! / matrix.values[matrix.base[j]! + j]!
+    y[j] = value
+    for (const i of columnRows[j]!) y[i]! -= matrix.values[matrix.base[i]! + j]! * value
+  }
 }
 
-/** Variance that two contrasts share through effects nobody observed. */
-function sharedUnseen(a: Contrast, b: Contrast, variance: (effect: UnseenEffect) => number): number {
+/** L^-1 z of each contrast z, kept only at the places where any of them holds something. */
+function halves(laplace: Laplace, contrasts: readonly Contrast[]): Float64Array[] {
+  const used = new Uint8Array(laplace.x.length)
+  const full = contrasts.map((contrast) => {
+    const y = new Float64Array(laplace.x.length)
+    for (const col of contrast.cols) y[col]! += 1
+    solveSparse(laplace, y)
+    for (let k = 0; k < y.length; k++) if (y[k] !== 0) used[k] = 1
+    return y
+  })
+  const places = Int32Array.from(laplace.x.keys()).filter(k => used[k] === 1)
+  return full.map(y => Float64Array.from(places, k => y[k]!))
+}
+
+function dot(a: Float64Array, b: Float64Array): number {
   let sum = 0
-  for (const one of a.unseen) {
-    if (b.unseen.some(other => other.id === one.id)) sum += variance(one)
-  }
+  for (let k = 0; k < a.length; k++) sum += a[k]! * b[k]!
   return sum
+}
+
+/** A list of contrasts, and which pairs of them share an effect that nobody observed. */
+export interface ContrastList { contrasts: readonly Contrast[], shared: readonly { i: number, j: number, effect: UnseenEffect }[] }
+
+/** Makes a list ready, once for all settings of the sds. */
+export function contrastList(contrasts: readonly Contrast[]): ContrastList {
+  const shared = contrasts.flatMap((one, i) => one.unseen.flatMap(effect => contrasts.flatMap((other, j) =>
+    (other.unseen.some(({ id }) => id === effect.id) ? [{ i, j, effect }] : []))))
+  return { contrasts, shared }
 }
 
 /**
@@ -37,21 +61,20 @@ function sharedUnseen(a: Contrast, b: Contrast, variance: (effect: UnseenEffect)
  * @param centre the effects' posterior mean (the mode, or the mode corrected for skewness)
  * @param groupSds the groups' sds, for unseen effects
  */
-export function contrastMoments(laplace: Laplace, contrasts: readonly Contrast[], centre: Float64Array, groupSds: Float64Array): Moments {
-  const size = contrasts.length
-  const halves = contrasts.map(contrast => forward(laplace, contrast))
-  const variance = ({ group, knownSd }: UnseenEffect): number => (group < 0 ? knownSd : groupSds[group]!) ** 2
-  const mean = Float64Array.from(contrasts, contrast => contrast.cols.reduce((sum, col) => sum + centre[col]!, 0))
+export function contrastMoments(laplace: Laplace, list: ContrastList, centre: Float64Array, groupSds: Float64Array): Moments {
+  const size = list.contrasts.length
+  const half = halves(laplace, list.contrasts)
+  const mean = Float64Array.from(list.contrasts, contrast => contrast.cols.reduce((sum, col) => sum + centre[col]!, 0))
   const covariance = new Float64Array(size * size)
   for (let i = 0; i < size; i++) {
     for (let j = 0; j <= i; j++) {
-      let sum = sharedUnseen(contrasts[i]!, contrasts[j]!, variance)
-      const a = halves[i]!
-      const b = halves[j]!
-      for (let k = 0; k < a.length; k++) sum += a[k]! * b[k]!
-      covariance[i * size + j] = sum
-      covariance[j * size + i] = sum
+      const both = dot(half[i]!, half[j]!)
+      covariance[i * size + j] = both
+      covariance[j * size + i] = both
     }
+  }
+  for (const { i, j, effect } of list.shared) {
+    covariance[i * size + j]! += (effect.group < 0 ? effect.knownSd : groupSds[effect.group]!) ** 2
   }
   return { mean, covariance }
 }

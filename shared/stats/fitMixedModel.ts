@@ -1,14 +1,17 @@
-import { contrastMoments } from '#shared/stats/contrasts'
-import type { Contrast, Moments } from '#shared/stats/contrasts'
+import { contrastList, contrastMoments } from '#shared/stats/contrasts'
+import type { Contrast, ContrastList, Moments } from '#shared/stats/contrasts'
 import { logEvidence } from '#shared/stats/evidence'
+import { evidenceGradient } from '#shared/stats/evidenceGradient'
 import { splitNormal } from '#shared/stats/hyperposterior'
 import { designPoints } from '#shared/stats/integration'
 import { makeLaplace } from '#shared/stats/laplace'
 import type { Laplace } from '#shared/stats/laplace'
-import { maximise } from '#shared/stats/maximise'
+import { maximise, numericGradient } from '#shared/stats/maximise'
+import type { Gradient, SmoothFunction } from '#shared/stats/maximise'
 import type { LogSds, MixedModel } from '#shared/stats/mixedModel'
 import { addMoments, emptyMoments, meanMoments } from '#shared/stats/mixture'
-import { correctedMean } from '#shared/stats/skewness'
+import { meanShift } from '#shared/stats/skewness'
+import { posteriorVariances } from '#shared/stats/variances'
 
 export interface MixedFit {
   /** posterior means of the groups' sds and of sigma (their modes where nothing is integrated) */
@@ -29,24 +32,33 @@ export interface MixedFitOptions {
 const leastSd = 1e-4
 const greatestSd = 10
 
-/** Enough for sds to a few per cent of their own uncertainty. */
-const defaultPoints = 192
+/** Enough for means of the sds to about a tenth of their posterior sd. */
+const defaultPoints = 96
 
 /** Points that weigh less than this (the mode weighs about 1) are left out. */
-const negligible = 1e-3
+const negligible = 0.01
+
+/** Evidence and its gradient; by differences where some effects are maximised, not integrated. */
+function evidenceOf(laplace: Laplace): { f: SmoothFunction, gradient: Gradient } {
+  const f: SmoothFunction = at => logEvidence(laplace, at)
+  const whole = laplace.model.integrated === laplace.x.length
+  return { f, gradient: whole ? at => evidenceGradient(laplace, at) : numericGradient(f) }
+}
 
 function searchMode(laplace: Laplace): { at: LogSds, value: number } {
   const size = laplace.model.groups + 1
   const start = new Float64Array(size).fill(Math.log(0.2))
   start[size - 1] = Math.log(0.4)
   const box = { lower: new Float64Array(size).fill(Math.log(leastSd)), upper: new Float64Array(size).fill(Math.log(greatestSd)) }
-  return maximise(at => logEvidence(laplace, at), start, box)
+  const { f, gradient } = evidenceOf(laplace)
+  return maximise(f, gradient, start, box)
 }
 
 /** Moments at one setting of the sds, the workspace standing at the mode of the effects there. */
-function momentsHere(laplace: Laplace, at: LogSds, lists: readonly (readonly Contrast[])[]): MixedFit {
+function momentsHere(laplace: Laplace, at: LogSds, lists: readonly ContrastList[]): MixedFit {
   const sds = at.map(Math.exp)
-  const centre = correctedMean(laplace)
+  const shift = meanShift(laplace, posteriorVariances(laplace).etas)
+  const centre = laplace.x.map((value, k) => value + shift.x[k]!)
   return {
     groupSds: sds.slice(0, -1),
     sigma: sds[sds.length - 1]!,
@@ -58,10 +70,11 @@ function momentsHere(laplace: Laplace, at: LogSds, lists: readonly (readonly Con
  * Weighted fit over points spread around the mode of the sds. Each weight is the evidence over the density that the points were
  * spread by; both are taken against their values at the mode, so nothing overflows.
  */
-function integrate(laplace: Laplace, mode: LogSds, peak: number, count: number, lists: readonly (readonly Contrast[])[]): MixedFit {
-  const shape = splitNormal(at => logEvidence(laplace, at), mode, peak)
+function integrate(laplace: Laplace, mode: LogSds, peak: number, count: number, lists: readonly ContrastList[]): MixedFit {
+  const { f, gradient } = evidenceOf(laplace)
+  const shape = splitNormal(f, gradient, mode, peak)
   const sds = new Float64Array(mode.length)
-  const sums = lists.map(list => emptyMoments(list.length))
+  const sums = lists.map(list => emptyMoments(list.contrasts.length))
   let total = 0
   for (const { at, logDensity } of designPoints(shape, count)) {
     const weight = Math.exp(logEvidence(laplace, at) - peak - logDensity)
@@ -79,10 +92,11 @@ function integrate(laplace: Laplace, mode: LogSds, peak: number, count: number, 
  * Fits an interval-censored mixed model: sds by their posterior (Laplace evidence, half-normal priors), effects by their mode
  * corrected for skewness, both averaged over the sds so that not knowing the sds widens every interval.
  *
- * @param lists lists of contrasts whose joint moments are wanted
+ * @param wanted lists of contrasts whose joint moments are wanted
  * @throws RangeError for a malformed model; Error where a direction is neither seen nor held by a prior
  */
-export function fitMixedModel(model: MixedModel, lists: readonly (readonly Contrast[])[], options: MixedFitOptions = {}): MixedFit {
+export function fitMixedModel(model: MixedModel, wanted: readonly (readonly Contrast[])[], options: MixedFitOptions = {}): MixedFit {
+  const lists = wanted.map(contrastList)
   const laplace = makeLaplace(model)
   const count = options.points ?? defaultPoints
   let at: LogSds = Float64Array.from(options.sds ?? [], Math.log)

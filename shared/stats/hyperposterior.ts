@@ -1,5 +1,5 @@
 import { cholesky, invert } from '#shared/stats/smallMatrix'
-import type { SmoothFunction } from '#shared/stats/maximise'
+import type { Gradient, SmoothFunction } from '#shared/stats/maximise'
 
 /**
  * A stand-in for the posterior of the log sds: a normal one whose spread may differ below and above the mode along each axis.
@@ -12,28 +12,21 @@ export interface SplitNormal {
   factor: Float64Array[]
 }
 
-const step = 0.15
+const step = 0.1
 
-/** Negative Hessian at the mode by differences. */
-function curvature(f: SmoothFunction, mode: Float64Array, peak: number): Float64Array[] {
-  const shifted = (moves: readonly [number, number][]): number => {
+/** Negative Hessian at the mode, by central differences of the gradient. */
+function curvature(f: SmoothFunction, gradient: Gradient, mode: Float64Array): Float64Array[] {
+  const slopes = (axis: number, by: number): Float64Array => {
     const at = mode.slice()
-    for (const [axis, by] of moves) at[axis]! += by
-    return f(at)
+    at[axis]! += by
+    f(at)
+    return gradient(at)
   }
-  const up = mode.map((_, k) => shifted([[k, step]]))
-  const down = mode.map((_, k) => shifted([[k, -step]]))
-  const hessian = Array.from(mode, () => new Float64Array(mode.length))
-  for (let i = 0; i < mode.length; i++) {
-    hessian[i]![i] = Math.max((2 * peak - up[i]! - down[i]!) / step ** 2, 0.25)
-    for (let j = 0; j < i; j++) {
-      const both = shifted([[i, step], [j, step]])
-      const mixed = (up[i]! + up[j]! - both - peak) / step ** 2
-      hessian[i]![j] = mixed
-      hessian[j]![i] = mixed
-    }
-  }
-  return hessian
+  const rows = Array.from(mode, (_, axis) => {
+    const up = slopes(axis, step)
+    return slopes(axis, -step).map((down, k) => (down - up[k]!) / (2 * step))
+  })
+  return rows.map((row, i) => row.map((value, j) => (i === j ? Math.max(value, 0.25) : 0.5 * (value + rows[j]![i]!))))
 }
 
 /** Covariance from the curvature, off-diagonals shrunk until it is positive definite. */
@@ -53,9 +46,14 @@ function spread(f: SmoothFunction, mode: Float64Array, peak: number, direction: 
   return sd * Math.min(Math.max(factor, 0.5), 3)
 }
 
-/** Fits the stand-in to a log density around its mode. */
-export function splitNormal(f: SmoothFunction, mode: Float64Array, peak: number): SplitNormal {
-  const cov = covariance(curvature(f, mode, peak))
+/**
+ * Fits the stand-in to a log density around its mode.
+ *
+ * @param gradient called only at the point where f was called last
+ * @param peak f at the mode
+ */
+export function splitNormal(f: SmoothFunction, gradient: Gradient, mode: Float64Array, peak: number): SplitNormal {
+  const cov = covariance(curvature(f, gradient, mode))
   const sd = Float64Array.from(cov, (row, k) => Math.sqrt(row[k]!))
   const correlation = cov.map((row, i) => row.map((value, j) => value / (sd[i]! * sd[j]!)))
   const factor = cholesky(correlation)

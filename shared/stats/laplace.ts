@@ -14,6 +14,10 @@ export interface Laplace {
   d1: Float64Array
   curvature: Float64Array
   d3: Float64Array
+  /** per observation: derivatives by ln sigma of the log likelihood, of d1 and of the curvature */
+  byScale: Float64Array
+  d1ByScale: Float64Array
+  curvatureByScale: Float64Array
   /** prior precision of each effect and of the day effects */
   precision: Float64Array
   dayPrecision: number
@@ -36,6 +40,9 @@ export function makeLaplace(model: MixedModel): Laplace {
     d1: new Float64Array(n),
     curvature: new Float64Array(n),
     d3: new Float64Array(n),
+    byScale: new Float64Array(n),
+    d1ByScale: new Float64Array(n),
+    curvatureByScale: new Float64Array(n),
     precision: new Float64Array(model.group.length),
     dayPrecision: 0,
     dayCurvature: new Float64Array(model.days),

@@ -3,6 +3,7 @@
 export interface Box { lower: Float64Array, upper: Float64Array }
 
 export type SmoothFunction = (at: Float64Array) => number
+export type Gradient = (at: Float64Array) => Float64Array
 
 const difference = 1e-3
 const mostSteps = 200
@@ -11,15 +12,21 @@ function clamp(at: Float64Array, box: Box): Float64Array {
   return at.map((value, k) => Math.min(Math.max(value, box.lower[k]!), box.upper[k]!))
 }
 
-/** Gradient by central differences; zero along an axis that pushes out of the box where the point stands on its wall. */
-export function numericGradient(f: SmoothFunction, at: Float64Array, box: Box): Float64Array {
-  return at.map((value, k) => {
+/** Gradient by central differences. */
+export function numericGradient(f: SmoothFunction): Gradient {
+  return at => at.map((value, k) => {
     const up = at.slice()
     const down = at.slice()
     up[k] = value + difference
     down[k] = value - difference
-    const slope = (f(up) - f(down)) / (2 * difference)
-    const pushesOut = (value <= box.lower[k]! && slope < 0) || (value >= box.upper[k]! && slope > 0)
+    return (f(up) - f(down)) / (2 * difference)
+  })
+}
+
+/** Gradient with zero along an axis that pushes out of the box where the point stands on its wall. */
+function inside(gradient: Gradient, box: Box): Gradient {
+  return at => gradient(at).map((slope, k) => {
+    const pushesOut = (at[k]! <= box.lower[k]! && slope < 0) || (at[k]! >= box.upper[k]! && slope > 0)
     return pushesOut ? 0 : slope
   })
 }
@@ -59,28 +66,30 @@ function shorten(direction: Float64Array): Float64Array {
 }
 
 /**
- * The point of the box where f is greatest near the start, by BFGS with central differences.
+ * The point of the box where f is greatest near the start, by BFGS.
  *
+ * @param gradient called only at the point where f was called last
  * @param tolerance greatest slope, per unit of any variable, at which the search stops
  */
-export function maximise(f: SmoothFunction, start: Float64Array, box: Box, tolerance = 1e-4): { at: Float64Array, value: number } {
+export function maximise(f: SmoothFunction, gradient: Gradient, start: Float64Array, box: Box, tolerance = 1e-4) {
+  const slopes = inside(gradient, box)
   let at = clamp(start, box)
   let value = f(at)
-  let gradient = numericGradient(f, at, box)
+  let slope = slopes(at)
   let inverse = identity(at.length)
-  for (let step = 0; step < mostSteps && gradient.some(slope => Math.abs(slope) > tolerance); step++) {
-    let direction = shorten(Float64Array.from(inverse, row => dot(row, gradient)))
-    if (!(dot(direction, gradient) > 0)) {
+  for (let step = 0; step < mostSteps && slope.some(one => Math.abs(one) > tolerance); step++) {
+    let direction = shorten(Float64Array.from(inverse, row => dot(row, slope)))
+    if (!(dot(direction, slope) > 0)) {
       inverse = identity(at.length)
-      direction = shorten(gradient.slice())
+      direction = shorten(slope.slice())
     }
-    const found = lineSearch(f, at, value, direction, dot(direction, gradient), box)
+    const found = lineSearch(f, at, value, direction, dot(direction, slope), box)
     if (found === null) break
-    const nextGradient = numericGradient(f, found.next, box)
-    update(inverse, found.next.map((here, k) => here - at[k]!), gradient.map((slope, k) => slope - nextGradient[k]!))
+    const next = slopes(found.next)
+    update(inverse, found.next.map((here, k) => here - at[k]!), slope.map((one, k) => one - next[k]!))
     at = found.next
     value = found.nextValue
-    gradient = nextGradient
+    slope = next
   }
   return { at, value }
 }

@@ -10,7 +10,7 @@ export interface MixedModel {
   /** ends of the observations, offsets taken off; -Infinity and Infinity allowed */
   lo: Float64Array
   hi: Float64Array
-  /** effects of observation i: cols and coefs from rowStart[i] to rowStart[i + 1] */
+  /** effects of observation i: cols (rising) and coefs from rowStart[i] to rowStart[i + 1] */
   rowStart: Int32Array
   cols: Int32Array
   coefs: Float64Array
@@ -37,6 +37,19 @@ export interface MixedModel {
 /** Standard deviations at which a model is evaluated: logs of the groups' sds, then ln sigma. */
 export type LogSds = Float64Array
 
+function checkColumns(model: MixedModel): void {
+  for (let i = 0; i < model.lo.length; i++) {
+    let least = 0
+    for (let t = model.rowStart[i]!; t < model.rowStart[i + 1]!; t++) {
+      const col = model.cols[t]!
+      if (!(col >= least && col < model.group.length)) {
+        throw new RangeError(`effects of observation ${i} must rise and be between ${least} and ${model.group.length - 1}, got ${col}`)
+      }
+      least = col + 1
+    }
+  }
+}
+
 /** Throws a RangeError naming the first thing wrong with a model. */
 export function checkModel(model: MixedModel): void {
   const n = model.lo.length
@@ -49,9 +62,7 @@ export function checkModel(model: MixedModel): void {
       throw new RangeError(`observation ${i} must have lo < hi, got ${model.lo[i]} and ${model.hi[i]}`)
     }
   }
-  for (const col of model.cols) {
-    if (col < 0 || col >= model.group.length) throw new RangeError(`effect must be between 0 and ${model.group.length - 1}, got ${col}`)
-  }
+  checkColumns(model)
   if (model.sdScale.length !== model.groups) {
     throw new RangeError(`sdScale must have ${model.groups} entries, got ${model.sdScale.length}`)
   }

@@ -19,6 +19,9 @@ export function objective(laplace: Laplace, x: Float64Array, w: Float64Array): n
     laplace.d1[i] = terms.d1 / sigma
     laplace.curvature[i] = -terms.d2 / (sigma * sigma)
     laplace.d3[i] = terms.d3 / (sigma * sigma * sigma)
+    laplace.byScale[i] = terms.dLogScale
+    laplace.d1ByScale[i] = (terms.d1ByLogScale - terms.d1) / sigma
+    laplace.curvatureByScale[i] = -(terms.d2ByLogScale - 2 * terms.d2) / (sigma * sigma)
   }
   let square = 0
   for (let k = 0; k < x.length; k++) square += precision[k]! * x[k]! * x[k]!

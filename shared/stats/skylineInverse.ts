@@ -1,28 +1,17 @@
 import { makeSkyline } from '#shared/stats/skyline'
 import type { Skyline } from '#shared/stats/skyline'
 
-/** For each column, the rows below it whose skyline reaches it. */
-function columnRows(factor: Skyline): Int32Array[] {
-  const rows: number[][] = Array.from({ length: factor.size }, () => [])
-  for (let i = 0; i < factor.size; i++) {
-    for (let j = factor.first[i]!; j < i; j++) {
-      if (factor.values[factor.base[i]! + j] !== 0) rows[j]!.push(i)
-    }
-  }
-  return rows.map(list => Int32Array.from(list))
-}
-
 /**
  * The entries of A^-1 that lie within A's skyline, from the Cholesky factor of A, without forming the rest.
  * Source: K. Takahashi, J. Fagan, M.-S. Chin, Formation of a sparse bus impedance matrix, 1973.
  *
- * @returns a matrix with the same skyline; other entries of the inverse are not known
+ * @param columns for each column the rows below it that the factor can fill, rising
+ * @returns a matrix with the same skyline that holds the inverse at those places and on the diagonal; other entries are 0 and mean nothing
  */
-export function inverseWithin(factor: Skyline): Skyline {
+export function inverseWithin(factor: Skyline, columns: readonly Int32Array[]): Skyline {
   const inverse = makeSkyline(factor.first)
   const { base, values } = factor
   const out = inverse.values
-  const columns = columnRows(factor)
   for (let j = factor.size - 1; j >= 0; j--) {
     const rows = columns[j]!
     const diagonal = values[base[j]! + j]!

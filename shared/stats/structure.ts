@@ -7,12 +7,19 @@ export interface Structure {
   /** observations of each day: order[dayStart[d]] to order[dayStart[d + 1]] */
   dayStart: Int32Array
   order: Int32Array
+  /** observations with the same effects on the same day are alike: class of each, and one observation of each class */
+  classOf: Int32Array
+  example: Int32Array
+  /** classes of each day: classes of day d are dayClass[d] to dayClass[d + 1]; those without a day come last */
+  dayClass: Int32Array
   /** effects met on each day, rising: dayCols[dayColStart[d]] to ... */
   dayColStart: Int32Array
   dayCols: Int32Array
   /** for each entry of model.cols the place of its effect in dayCols, -1 without a day */
   slot: Int32Array
   matrix: Skyline
+  /** for each column of the factor, the rows below it that can hold anything */
+  columnRows: Int32Array[]
 }
 
 function groupByDay(model: MixedModel): Pick<Structure, 'dayStart' | 'order'> {
@@ -27,12 +34,59 @@ function groupByDay(model: MixedModel): Pick<Structure, 'dayStart' | 'order'> {
   return { dayStart, order }
 }
 
+function sameRow(model: MixedModel, i: number, j: number): boolean {
+  const length = model.rowStart[i + 1]! - model.rowStart[i]!
+  if (model.rowStart[j + 1]! - model.rowStart[j]! !== length) return false
+  for (let t = 0; t < length; t++) {
+    const a = model.rowStart[i]! + t
+    const b = model.rowStart[j]! + t
+    if (model.cols[a] !== model.cols[b] || model.coefs[a] !== model.coefs[b]) return false
+  }
+  return true
+}
+
+/** Puts like observations of each day into classes. */
+function classes(model: MixedModel, days: Pick<Structure, 'dayStart' | 'order'>): Pick<Structure, 'classOf' | 'example' | 'dayClass'> {
+  const classOf = new Int32Array(model.lo.length)
+  const example: number[] = []
+  const dayClass = new Int32Array(model.days + 1)
+  const assign = (i: number, from: number): void => {
+    let found = from
+    while (found < example.length && !sameRow(model, example[found]!, i)) found++
+    if (found === example.length) example.push(i)
+    classOf[i] = found
+  }
+  for (let d = 0; d < model.days; d++) {
+    for (let m = days.dayStart[d]!; m < days.dayStart[d + 1]!; m++) assign(days.order[m]!, dayClass[d]!)
+    dayClass[d + 1] = example.length
+  }
+  model.day.forEach((day, i) => {
+    if (day < 0) assign(i, example.length)
+  })
+  return { classOf, example: Int32Array.from(example), dayClass }
+}
+
 function colsOf(model: MixedModel, observations: Iterable<number>): number[] {
   const seen = new Set<number>()
   for (const i of observations) {
     for (let t = model.rowStart[i]!; t < model.rowStart[i + 1]!; t++) seen.add(model.cols[t]!)
   }
   return [...seen].sort((a, b) => a - b)
+}
+
+/** Rows of each column once elimination has filled the matrix in, from the lists of effects that meet. */
+function filledRows(size: number, meetings: readonly (readonly number[])[]): Int32Array[] {
+  const rows = Array.from({ length: size }, () => new Set<number>())
+  for (const cols of meetings) {
+    for (const a of cols) for (const b of cols) if (b > a) rows[a]!.add(b)
+  }
+  return rows.map((below, col) => {
+    const sorted = Int32Array.from(below).sort()
+    const next = sorted[0]
+    if (next !== undefined) for (const row of sorted) if (row > next) rows[next]!.add(row)
+    rows[col] = new Set()
+    return sorted
+  })
 }
 
 /** Lets every effect of a list reach back to the least of them. */
@@ -45,14 +99,17 @@ function reach(first: Int32Array, cols: readonly number[]): void {
 /** Builds the index lists and the empty matrix of a model. Effects of one block should stand together, shared ones last. */
 export function structureOf(model: MixedModel): Structure {
   const { dayStart, order } = groupByDay(model)
+  const alike = classes(model, { dayStart, order })
   const first = Int32Array.from(model.group, (_, col) => col)
   const slot = new Int32Array(model.cols.length).fill(-1)
   const dayColStart = new Int32Array(model.days + 1)
   const dayCols: number[] = []
+  const meetings: number[][] = []
   for (let d = 0; d < model.days; d++) {
     const members = order.subarray(dayStart[d]!, dayStart[d + 1]!)
     const cols = colsOf(model, members)
     reach(first, cols)
+    meetings.push(cols)
     for (const i of members) {
       for (let t = model.rowStart[i]!; t < model.rowStart[i + 1]!; t++) slot[t] = dayCols.length + cols.indexOf(model.cols[t]!)
     }
@@ -60,7 +117,13 @@ export function structureOf(model: MixedModel): Structure {
     dayColStart[d + 1] = dayCols.length
   }
   model.day.forEach((day, i) => {
-    if (day < 0) reach(first, colsOf(model, [i]))
+    if (day >= 0) return
+    const cols = colsOf(model, [i])
+    reach(first, cols)
+    meetings.push(cols)
   })
-  return { dayStart, order, dayColStart, dayCols: Int32Array.from(dayCols), slot, matrix: makeSkyline(first) }
+  return {
+    dayStart, order, ...alike, dayColStart, dayCols: Int32Array.from(dayCols), slot,
+    matrix: makeSkyline(first), columnRows: filledRows(first.length, meetings),
+  }
 }
