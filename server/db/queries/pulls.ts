@@ -35,7 +35,7 @@ export async function publishedPulls(db: Database | Transaction): Promise<PullRe
     heldN: row.heldN,
     movedN: row.movedN,
     shankAngleDeg: row.shankAngleDeg,
-    fresh: row.fresh,
+    ...row.fresh ? {} : { fresh: false },
     ...row.after === null ? {} : { after: row.after as PullAfter },
     ...row.veer === null ? {} : { veer: row.veer as VeerOutcome },
     ...row.pair === null ? {} : { pair: row.pair },
