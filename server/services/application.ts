@@ -1,11 +1,10 @@
 import type PgBoss from 'pg-boss'
 import { connect, type Connection } from '../db/client'
 import { applyMigrations } from '../db/migrate'
-import { newestFitId } from '../db/queries/fits'
 import { ping } from '../db/queries/health'
 import { openQueue, queues, startQueue } from '../jobs/queue'
 import { log } from '../utils/log'
-import { startEvidence, stopEvidence } from './evidence'
+import { currentEvidence, startEvidence, stopEvidence } from './evidence'
 import { refit } from './refit'
 
 interface Application { connection: Connection, boss: PgBoss | null, migrated: boolean, stopping: AbortController }
@@ -80,7 +79,7 @@ export async function readiness(): Promise<Readiness> {
     await ping(database())
     state.database = true
     state.migrated = application?.migrated ?? false
-    state.fit = state.migrated && await newestFitId(database()) !== null
+    state.fit = state.migrated && await currentEvidence() !== null
   }
   catch { /* what was not reached stays false */ }
   return state

@@ -2,6 +2,7 @@ import type * as z from 'zod/mini'
 import { designsAnswer, estimatesAnswer, seabedsAnswer } from '#shared/schemas/answers/catalogue'
 import { fitAnswer } from '#shared/schemas/answers/fit'
 import { loadAnswer } from '#shared/schemas/answers/load'
+import { referenceBoatsAnswer } from '#shared/schemas/answers/method'
 import { notationAnswer } from '#shared/schemas/answers/notation'
 import { aliveAnswer, readyAnswer } from '#shared/schemas/answers/problem'
 import { rankingAnswer } from '#shared/schemas/answers/ranking'
@@ -39,6 +40,7 @@ export const operations: readonly Operation[] = [
   { path: '/api/designs', method: 'GET', id: 'designs', summary: 'Designs with their sizes', query: designsQuery, answer: designsAnswer, refusals: [422, 429, 503] },
   { path: '/api/seabeds', method: 'GET', id: 'seabeds', summary: 'Seabeds and what they are', query: seabedsQuery, answer: seabedsAnswer, refusals: [422, 429, 503] },
   { path: '/api/estimates', method: 'GET', id: 'estimates', summary: 'What the newest fit says', query: estimatesQuery, answer: estimatesAnswer, refusals: [422, 429, 503] },
+  { path: '/api/reference-boats', method: 'GET', id: 'referenceBoats', summary: 'Three reference boats and the smallest sizes that serve', answer: referenceBoatsAnswer, refusals: [429, 503] },
   { path: '/api/openapi.json', method: 'GET', id: 'openapi', summary: 'This description', refusals: [] },
   { path: '/api/health', method: 'GET', id: 'health', summary: 'The server is alive', answer: aliveAnswer, refusals: [] },
   { path: '/api/ready', method: 'GET', id: 'ready', summary: 'The server can answer', answer: readyAnswer, refusals: [503] },

@@ -21,6 +21,8 @@ export interface DesignListing {
   family: Family
   familyName: string
   description: string
+  /** fluke angles or the like that its maker provides */
+  settings: string[]
   /** a design of the demo world */
   invented: boolean
   sizes: SizeListing[]

@@ -26,6 +26,7 @@ export const designsAnswer = fieldsOf({
     family: z.enum(families),
     familyName: words('Family in words'),
     description: words('Description'),
+    settings: list(z.string(), 'Fluke angles or the like that its maker provides'),
     invented: flag('A design of the demo world'),
     sizes: list(size, 'Sizes, lightest first'),
   }, 'An anchor design'), 'Designs by name'),

@@ -4,9 +4,9 @@ import { fieldsOf } from '../fields'
 import { count, list, words } from './figures'
 
 const constituent = fieldsOf({
-  noun: words('As printed'),
+  noun: words('In words'),
   natsur: z.nullable(count('Code of the nature of surface, S-57 NATSUR')),
-  qualifiers: list(z.string(), 'As printed'),
+  qualifiers: list(z.string(), 'In words'),
   natqua: list(z.int(), 'Codes of the qualifying terms, S-57 NATQUA'),
 }, 'One constituent')
 

@@ -3,6 +3,7 @@ import type * as z from 'zod/mini'
 import type { designsAnswer, estimatesAnswer, seabedsAnswer } from '#shared/schemas/answers/catalogue'
 import type { fitAnswer } from '#shared/schemas/answers/fit'
 import type { loadAnswer } from '#shared/schemas/answers/load'
+import type { referenceBoatsAnswer } from '#shared/schemas/answers/method'
 import type { notationAnswer } from '#shared/schemas/answers/notation'
 import type { rankingAnswer } from '#shared/schemas/answers/ranking'
 import type { rodeAnswer } from '#shared/schemas/answers/rode'
@@ -14,6 +15,7 @@ import type { readChartNotation } from '#shared/seabed/notation'
 import type { DesignsAnswer, EstimatesAnswer, SeabedsAnswer } from '#shared/types/catalogue'
 import type { FitAnswer, FitRequest } from '#shared/types/fit'
 import type { LoadAnswer, LoadRequest } from '#shared/types/load'
+import type { ReferenceBoatsAnswer } from '#shared/types/method'
 import type { RankingAnswer, RankingRequest } from '#shared/types/ranking'
 import type { RodeAnswer, RodeRequest } from '#shared/types/rode'
 
@@ -34,6 +36,7 @@ describe('schemas and types say the same', () => {
     expectTypeOf<z.output<typeof notationAnswer>>().toEqualTypeOf<ReturnType<typeof readChartNotation>>()
     expectTypeOf<z.output<typeof designsAnswer>>().toEqualTypeOf<DesignsAnswer>()
     expectTypeOf<z.output<typeof seabedsAnswer>>().toEqualTypeOf<SeabedsAnswer>()
+    expectTypeOf<z.output<typeof referenceBoatsAnswer>>().toEqualTypeOf<ReferenceBoatsAnswer>()
     expectTypeOf<z.output<typeof estimatesAnswer>>().toEqualTypeOf<EstimatesAnswer>()
   })
 })
