@@ -17,6 +17,8 @@ export interface CampaignPlan {
   pullsPerDay: number
   /** share of pulls made with a modified anchor, in back-to-back pairs */
   modifiedShare?: number
+  /** share of pulls where the anchor never sets */
+  neverSetShare?: number
   sds?: Partial<HoldingSds & { sigma: number }>
   /** number of rigs, each with a calibration error of sd 0.10; 0: none named, no error */
   rigs?: number
@@ -75,7 +77,7 @@ export function simulateCampaign(plan: CampaignPlan): Campaign {
   const random = randomNumbers(plan.seed)
   const sds = { ...campaignSds, ...plan.sds }
   const effect = effects(random)
-  const { step = 1.18, limitN = 4500, firstN = 300, massesKg = [15, 20, 25], anglesDeg = [0], rigs = 1, modifiedShare = 0 } = plan
+  const { step = 1.18, limitN = 4500, firstN = 300, massesKg = [15, 20, 25], anglesDeg = [0], rigs = 1, modifiedShare = 0, neverSetShare = 0 } = plan
   const designs = Array.from({ length: plan.designs }, (_, d) => ({ design: `d${d}`, family: familyNames[d % plan.families]! }))
   const truth = new Map<string, number>()
   for (const seabed of plan.seabeds) {
@@ -95,6 +97,7 @@ export function simulateCampaign(plan: CampaignPlan): Campaign {
       const massKg = massesKg[random.below(massesKg.length)]!
       return Array.from({ length: plan.pullsPerDay }, (_, p): PullRecord => {
         const modified = index < 4 && random.uniform() < modifiedShare
+        const neverSet = neverSetShare > 0 && random.uniform() < neverSetShare
         const tau = modified
           ? effect(`tau ${design}`, sds.modification) + effect(`tau ${design} ${seabed}`, sds.modificationSeabed)
           : 0
@@ -104,7 +107,8 @@ export function simulateCampaign(plan: CampaignPlan): Campaign {
           + effect(`u ${trial}`, sds.trial) + effect(`w ${trial} ${design}`, sds.anchorDay) + (rig === undefined ? 0 : effect(`v ${rig}`, 0.1))
           + sds.sigma * random.normal()
         return {
-          trial, ...(rig === undefined ? {} : { rig }), design, family, massKg, seabed, set: true, shankAngleDeg, ...stepped(Math.exp(ln), step, limitN, firstN),
+          trial, ...(rig === undefined ? {} : { rig }), design, family, massKg, seabed, shankAngleDeg,
+          ...(neverSet ? { set: false, heldN: 0, movedN: null } : { set: true, ...stepped(Math.exp(ln), step, limitN, firstN) }),
           ...(modifiedShare > 0 ? { pair: `${index}-${p >> 1}` } : {}), ...(modified ? { modification: 'blunted-edge' } : {}),
         }
       })
