@@ -83,7 +83,7 @@ export default defineNuxtConfig({
         'style-src': ['\'self\'', '\'unsafe-inline\''],
         'img-src': ['\'self\'', 'data:'],
         'font-src': ['\'self\''],
-        'connect-src': ['\'self\''],
+        'connect-src': isDev ? ['\'self\'', 'ws:'] : ['\'self\''],
         'manifest-src': ['\'self\''],
         'form-action': ['\'self\''],
         'base-uri': ['\'none\''],
