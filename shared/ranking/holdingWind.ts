@@ -15,6 +15,12 @@ function reserve(lnHoldingN: number, point: DemandPoint): number {
   return point.lnLoad === -Infinity ? Infinity : lnHoldingN + point.lnUplift - point.lnLoad
 }
 
+/** The gust up to which the most any pull showed would have held, m/s; Infinity where that is past the wind reached anyway. */
+function shownWind({ surveyByGust }: PlanDemand, lnMostN: number, reachedMs: number): number {
+  if (reachedMs < Infinity && reserve(lnMostN, surveyByGust.at(reachedMs)) >= 0) return Infinity
+  return greatestSpeed(surveyByGust, point => reserve(lnMostN, point)) ?? 0
+}
+
 /**
  * The wind at which the chance once set falls to 0.9, said as mean and gust. Capped at the wind where F/r equals the most
  * any pull of this design on this seabed showed, scaled to the anchor's mass; `atLeast` where the cap decides. A gust
@@ -30,8 +36,7 @@ export function findHoldingWind(
 ): HoldingWind {
   const reached = greatestSpeed(demand.surveyByGust, point => holdingScore(prediction, point, variance) - score90)
   if (reached === null) return { reason: 'doesNotReach' }
-  const lnMost = mostShownN === null ? Infinity : Math.log(mostShownN)
-  const shown = lnMost === Infinity ? Infinity : greatestSpeed(demand.surveyByGust, point => reserve(lnMost, point)) ?? 0
+  const shown = mostShownN === null ? Infinity : shownWind(demand, Math.log(mostShownN), reached)
   const gustMs = Math.min(reached, shown)
   if (gustMs === Infinity) return { reason: 'beyond64kn' }
   return { meanMs: gustMs / demand.gustFactor, gustMs, atLeast: shown < reached }

@@ -12,7 +12,7 @@ import { demandPoint, type DemandPoint } from './chance'
 import type { PlanDemand } from './context'
 import { tabulateDemand } from './demand'
 import { tabulateAngle, type AngleAt } from './rodeTable'
-import type { DemandTable } from './speedSearch'
+import { greatestSpeed, type DemandTable } from './speedSearch'
 
 /** The greatest wind said as a number, m/s: 64 kn, as a gust for holding winds, as entered for the table load (ours). */
 export const greatestWindMs = 64 * KN_MS
@@ -55,10 +55,19 @@ function greatestLoad(loadAt: (speedMs: number) => number | null): number {
   return 0
 }
 
-/** Points of the table at lesser winds than the plan's, past the published shank angles. */
+/** Gust (m/s) up to which the rode leaves at least this share of holding; Infinity past the table. */
+function gustLeaving(table: DemandTable, share: number): number {
+  return greatestSpeed(table, ({ lnLoad, lnUplift }) => lnLoad === Infinity ? -Infinity : lnUplift - Math.log(share)) ?? 0
+}
+
+const liftedPoints = 96
+
+/** Demand at lesser winds than the plan's, from the published angles' limit to where the uplift factor stops falling. */
 function liftedBefore(table: DemandTable, gustMs: number): DemandPoint[] {
-  const lnLimit = Math.log(upliftFactor(publishedUpliftLimitRad))
-  return table.points.filter(({ lnUplift }, i) => lnUplift < lnLimit && (table.speedsMs[i] ?? Infinity) < gustMs)
+  const from = gustLeaving(table, upliftFactor(publishedUpliftLimitRad))
+  if (from >= gustMs) return []
+  const to = Math.min(gustMs, gustLeaving(table, upliftFactor(Math.PI / 2) + 1e-9))
+  return Array.from({ length: liftedPoints }, (_, i) => table.at(from + (to - from) * i / liftedPoints))
 }
 
 /**

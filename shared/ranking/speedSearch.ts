@@ -8,6 +8,7 @@ export interface DemandTable {
 }
 
 const toleranceMs = 1e-6
+const toleranceScore = 1e-8
 
 /** Index of the last grid speed whose score is at least 0; the first is known to be. Scores fall with the wind. */
 function lastPassing(table: DemandTable, score: (point: DemandPoint) => number): number {
@@ -34,7 +35,7 @@ function crossing(low: number, high: number, scoreAt: (speedMs: number) => numbe
     const halving = i % 8 === 7 || !Number.isFinite(lowScore) || !Number.isFinite(highScore)
     const middle = halving ? (low + high) / 2 : low + (high - low) * lowScore / (lowScore - highScore)
     const score = scoreAt(middle)
-    if (Math.abs(score) < 1e-9) return middle
+    if (Math.abs(score) < toleranceScore) return middle
     if (score >= 0) {
       low = middle
       lowScore = score

@@ -10,10 +10,7 @@ import { makePlan } from '../../factories/plan'
 interface Case {
   plan: { dragAreaM2: number, exposure: Exposure, kind: WindKind, speedMs: number, heightM: number, lengthM: number, weightNPerM: number }
   massKg: number
-  fit: {
-    lnMean15Kg: number, lnSd: number, betaMean: number, betaSd: number, betaCovariance: number, exponent: number
-    sigma: number, trial: number, anchorDay: number, mostShown15KgN: number
-  }
+  fit: Record<'lnMean15Kg' | 'lnSd' | 'betaMean' | 'betaSd' | 'betaCovariance' | 'exponent' | 'sigma' | 'trial' | 'anchorDay' | 'mostShown15KgN', number>
   surveyN: number
   upliftFactor: number
   chance: number

@@ -27,9 +27,9 @@ const anyFit = fc.record({
   return makeSeabedFit(seabed, estimates, { covariance: makeCovariance(sds.slice(s * 5, s * 5 + 5), shared, betaSd) })
 }), { sigma }))
 
-/** Any sensible rode and weather: scope 1.5 to 10, chain alone or with rope. */
+/** Any sensible rode and weather: scope 1.05 to 10, chain alone or with rope. */
 const anyPlan = fc.record({
-  depthM: number(2, 30), scope: number(1.5, 10), chainShare: fc.constantFrom(1, 0.5, 0.1), diameterMm: fc.constantFrom(6, 8, 10, 13),
+  depthM: number(2, 30), scope: number(1.05, 10), chainShare: fc.constantFrom(1, 0.5, 0.1), diameterMm: fc.constantFrom(6, 8, 10, 13),
   swell: fc.constantFrom(...swells), currentMs: fc.constantFrom(0, 0.5, 1.5), speedMs: number(3, 25), kind: fc.constantFrom('mean' as const, 'gust' as const),
 }).map(({ depthM, scope, chainShare, diameterMm, speedMs, kind, ...more }): RankingRequest => {
   const lengthM = (depthM + 2) * scope
@@ -53,7 +53,7 @@ describe('a ranking', () => {
         const earlier = before.rows.find(({ design }) => design === row.design)
         row.seabeds.forEach(({ chance }, i) => {
           const then = earlier?.seabeds[i]?.chance ?? Number.NaN
-          if (then >= 0.01) expect(chance ?? Number.NaN).toBeLessThanOrEqual(then + 1e-9)
+          if (then >= 0.01) expect(chance ?? Number.NaN).toBeLessThanOrEqual(then + 1e-6)
         })
       }
     }), { numRuns: 150 })

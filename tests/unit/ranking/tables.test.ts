@@ -8,6 +8,7 @@ import { greatestSpeed } from '#shared/ranking/speedSearch'
 const rodes: [string, Omit<RodeInput, 'horizontalLoadN'>][] = [
   ['chain, long', { heightM: 9.5, chain: { lengthM: 45, weightNPerM: 18.8 } }],
   ['chain, short', { heightM: 9.5, chain: { lengthM: 20, weightNPerM: 18.8 } }],
+  ['chain, hardly longer than the height', { heightM: 30, chain: { lengthM: 31.5, weightNPerM: 18.8 } }],
   ['chain and rope', { heightM: 12, chain: { lengthM: 10, weightNPerM: 12 }, rope: { lengthM: 50, weightNPerM: 0.16 } }],
   ['weightless rope', { heightM: 10, chain: { lengthM: 0, weightNPerM: 0 }, rope: { lengthM: 50, weightNPerM: 0 } }],
 ]
@@ -17,7 +18,8 @@ describe('tabulateAngle', () => {
     const angleAt = (horizontalLoadN: number) => solveRode({ ...rode, horizontalLoadN }).shankAngleRad
     const table = tabulateAngle(angleAt, 30_000)
     for (let loadN = 5; loadN < 30_000; loadN *= 1.013) {
-      expect(Math.abs(table(loadN) - angleAt(loadN))).toBeLessThan(0.02 * Math.PI / 180)
+      const [read, solved] = [table(loadN), angleAt(loadN)].map(angle => Math.min(angle, 25 * Math.PI / 180))
+      expect(Math.abs((read ?? 0) - (solved ?? 1))).toBeLessThan(0.02 * Math.PI / 180)
     }
   })
 
