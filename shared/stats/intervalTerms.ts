@@ -23,7 +23,6 @@ export function emptyTerms(): IntervalTerms {
 
 /** Below this width, in standard deviations, the interval counts as an exact value: the error is its square over 24. */
 const exactWidth = 1e-5
-
 /** Past this many standard deviations a one-sided tail is taken from its asymptotic series. */
 const farTail = 100
 
@@ -90,9 +89,7 @@ function fill(log: number, a: number, b: number, p: number, q: number, out: Inte
 }
 
 /**
- * ln of the chance that a standard normal lies in (a, b), with derivatives. Works in log space: neither far tails nor narrow
- * intervals lose digits.
- *
+ * ln of the chance that a standard normal lies in (a, b), with derivatives: neither far tails nor narrow intervals lose digits.
  * @param a lower end in standard deviations, -Infinity allowed
  * @param b upper end, above a, Infinity allowed
  * @param out filled and returned, so that a loop over pulls makes no garbage

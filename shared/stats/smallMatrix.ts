@@ -13,7 +13,8 @@ export function cholesky(matrix: readonly Float64Array[]): Float64Array[] | null
       for (let k = 0; k < j; k++) sum -= rowI[k]! * rowJ[k]!
       if (i > j) {
         rowI[j] = sum / rowJ[j]!
-      } else {
+      }
+      else {
         if (!(sum > 0)) return null
         rowI[i] = Math.sqrt(sum)
       }

@@ -1,17 +1,14 @@
 import { makeSkyline } from '#shared/stats/skyline'
 import type { Skyline } from '#shared/stats/skyline'
+import { classesOf } from '#shared/stats/classes'
+import type { Classes } from '#shared/stats/classes'
 import type { MixedModel } from '#shared/stats/mixedModel'
 
 /** Index lists made once per model, so that each Newton step only adds numbers up. */
-export interface Structure {
+export interface Structure extends Classes {
   /** observations of each day: order[dayStart[d]] to order[dayStart[d + 1]] */
   dayStart: Int32Array
   order: Int32Array
-  /** observations with the same effects on the same day are alike: class of each, and one observation of each class */
-  classOf: Int32Array
-  example: Int32Array
-  /** classes of each day: classes of day d are dayClass[d] to dayClass[d + 1]; those without a day come last */
-  dayClass: Int32Array
   /** effects met on each day, rising: dayCols[dayColStart[d]] to ... */
   dayColStart: Int32Array
   dayCols: Int32Array
@@ -32,38 +29,6 @@ function groupByDay(model: MixedModel): Pick<Structure, 'dayStart' | 'order'> {
     if (day >= 0) order[next[day]!++] = i
   })
   return { dayStart, order }
-}
-
-function sameRow(model: MixedModel, i: number, j: number): boolean {
-  const length = model.rowStart[i + 1]! - model.rowStart[i]!
-  if (model.rowStart[j + 1]! - model.rowStart[j]! !== length) return false
-  for (let t = 0; t < length; t++) {
-    const a = model.rowStart[i]! + t
-    const b = model.rowStart[j]! + t
-    if (model.cols[a] !== model.cols[b] || model.coefs[a] !== model.coefs[b]) return false
-  }
-  return true
-}
-
-/** Puts like observations of each day into classes. */
-function classes(model: MixedModel, days: Pick<Structure, 'dayStart' | 'order'>): Pick<Structure, 'classOf' | 'example' | 'dayClass'> {
-  const classOf = new Int32Array(model.lo.length)
-  const example: number[] = []
-  const dayClass = new Int32Array(model.days + 1)
-  const assign = (i: number, from: number): void => {
-    let found = from
-    while (found < example.length && !sameRow(model, example[found]!, i)) found++
-    if (found === example.length) example.push(i)
-    classOf[i] = found
-  }
-  for (let d = 0; d < model.days; d++) {
-    for (let m = days.dayStart[d]!; m < days.dayStart[d + 1]!; m++) assign(days.order[m]!, dayClass[d]!)
-    dayClass[d + 1] = example.length
-  }
-  model.day.forEach((day, i) => {
-    if (day < 0) assign(i, example.length)
-  })
-  return { classOf, example: Int32Array.from(example), dayClass }
 }
 
 function colsOf(model: MixedModel, observations: Iterable<number>): number[] {
@@ -99,7 +64,7 @@ function reach(first: Int32Array, cols: readonly number[]): void {
 /** Builds the index lists and the empty matrix of a model. Effects of one block should stand together, shared ones last. */
 export function structureOf(model: MixedModel): Structure {
   const { dayStart, order } = groupByDay(model)
-  const alike = classes(model, { dayStart, order })
+  const alike = classesOf(model, dayStart, order)
   const first = Int32Array.from(model.group, (_, col) => col)
   const slot = new Int32Array(model.cols.length).fill(-1)
   const dayColStart = new Int32Array(model.days + 1)

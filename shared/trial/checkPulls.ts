@@ -10,7 +10,8 @@ function checkLoads(pull: PullRecord, name: string): void {
     if (pull.set && !(pull.movedN > pull.heldN)) {
       throw new RangeError(`${name}.movedN must be above heldN ${pull.heldN}, got ${pull.movedN}`)
     }
-  } else if (pull.set && pull.heldN === 0) {
+  }
+  else if (pull.set && pull.heldN === 0) {
     throw new RangeError(`${name}.heldN must be above 0 where the anchor set and did not move, got 0`)
   }
 }

@@ -85,7 +85,7 @@ export function simulateCampaign(plan: CampaignPlan): Campaign {
     effect(`beta ${seabed}`, 0.05)
     for (const { design, family } of designs) {
       truth.set(truthKey(design, seabed), mean + effect(`f ${family} ${seabed}`, sds.family) + effect(`a ${design}`, sds.design)
-        + effect(`g ${design} ${seabed}`, sds.designSeabed))
+      + effect(`g ${design} ${seabed}`, sds.designSeabed))
     }
   }
   const pulls = plan.seabeds.flatMap(seabed => Array.from({ length: plan.trialsPerSeabed }, (_, t) => {

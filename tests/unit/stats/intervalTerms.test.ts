@@ -16,7 +16,7 @@ const cases: readonly (readonly [string, number, number])[] = [
 
 describe('ln of the chance of an interval', () => {
   it.each([
-    [-1, 0.5, -0.62959563255286377], [20, 21, -203.91715537228816], [35, Infinity, -616.97510126192253], [0.2, 0.3, -3.253164190574811],
+    [-1, 0.5, -0.6295956325528638], [20, 21, -203.91715537228816], [35, Infinity, -616.9751012619225], [0.2, 0.3, -3.253164190574811],
   ])('is right from %d to %d (R 4.2.2 pnorm)', (a, b, expected) => {
     expect(Math.abs(intervalTerms(a, b, emptyTerms()).log / expected - 1)).toBeLessThan(1e-13)
     expect(Math.abs(intervalTerms(-b, -a, emptyTerms()).log / expected - 1)).toBeLessThan(1e-13)
