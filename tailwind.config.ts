@@ -31,6 +31,7 @@ export default {
       sentence: ['1.6875rem', { lineHeight: '1.75' }],
       title: ['2.5rem', { lineHeight: '1.15' }],
     },
+    fontWeight: { normal: 'var(--body-weight)', semibold: '600' },
     borderRadius: { none: '0' },
     boxShadow: { none: 'none' },
     extend: {

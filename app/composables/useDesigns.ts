@@ -1,8 +1,8 @@
 export interface DesignName { slug: string, name: string }
 
 /** Every design by name, for the choice of the reader's own; none while the catalogue cannot be read. */
-export async function useDesigns() {
-  const { data } = await useAsyncData('designs', async (): Promise<DesignName[]> => {
+export function useDesigns() {
+  return useAsyncData('designs', async (): Promise<DesignName[]> => {
     try {
       const { designs } = await $fetch<{ designs: DesignName[] }>('/api/designs')
       return designs.map(({ slug, name }) => ({ slug, name }))
@@ -11,5 +11,4 @@ export async function useDesigns() {
       return []
     }
   }, { default: () => [] })
-  return data
 }

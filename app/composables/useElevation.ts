@@ -1,6 +1,6 @@
 import type { RankingRequest } from '#shared/types/ranking'
 import { meanAndGust } from '#shared/load/gust'
-import type { ElevationLabels } from '~/components/rode/ElevationSheet.vue'
+import type { ElevationLabels } from '~/utils/drawing/labels'
 import type { PlanFigures } from '~/utils/plan/answer'
 import { describeRode } from '~/utils/drawing/describe'
 import { layElevation, narrowSheet, wideSheet } from '~/utils/drawing/elevation'
@@ -44,7 +44,6 @@ export function useElevation(figures: () => PlanFigures, request: () => RankingR
       load: show.force(plan.load.survey.totalN ?? 0),
       wind: `mean ${show.speed(meanMs)}, gusting ${show.speed(gustMs)}`,
       depth: `${show.length(plan.heightM - plan.boat.bowHeightM)}`,
-      bowHeight: show.length(plan.boat.bowHeightM),
       onBottom: `${show.length(lyingM, 0)} on the bottom`,
       span: `${show.length(answer.spanM, 0)} from anchor to bow`,
       shank: lyingM > 0 || answer.shankAngleDeg < 0.05 ? 'Shank flat' : `Shank lifted ${show.degrees(answer.shankAngleDeg)}`,

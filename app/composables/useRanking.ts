@@ -37,9 +37,11 @@ async function ask(request: RankingRequest | null, signal?: AbortSignal): Promis
  * The ranking of a plan: rendered with the page, then asked again as the plan changes; an answer that has been overtaken is dropped.
  *
  * @param request the plan, null while a word cannot be read
+ * @returns the newest reply; `rendered` is to be awaited once, in setup
  */
-export async function useRanking(request: () => RankingRequest | null) {
-  const { data: reply } = await useAsyncData('ranking', () => ask(request()), { deep: false })
+export function useRanking(request: () => RankingRequest | null) {
+  const rendered = useAsyncData('ranking', () => ask(request()), { deep: false })
+  const reply = rendered.data
   const waiting = ref(false)
   let pause: ReturnType<typeof setTimeout> | undefined
   let running: AbortController | undefined
@@ -63,5 +65,5 @@ export async function useRanking(request: () => RankingRequest | null) {
     clearTimeout(pause)
     running?.abort()
   })
-  return { reply, waiting }
+  return { reply, waiting, rendered }
 }

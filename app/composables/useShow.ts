@@ -17,7 +17,7 @@ export function useShow() {
     number: (value: number, kind: QuantityKind, decimals?: number): string => formatNumber(value, kind, system.value, { decimals }),
     length: (lengthM: number, decimals = 1): string =>
       imperial.value && lengthM >= 0 && lengthM < 30 && decimals > 0 ? formatFeetInches(lengthM) : formatQuantity(lengthM, 'length', system.value, { decimals: imperial.value ? 0 : decimals }),
-    mass: (massKg: number): string => formatQuantity(massKg, 'mass', system.value),
+    mass: (massKg: number): string => formatQuantity(massKg, 'mass', system.value, massKg >= 100 ? { decimals: 0 } : {}),
     speed: (speedMs: number): string => formatQuantity(speedMs, 'speed', system.value, { decimals: system.value === 'metric' ? 1 : 0 }),
     force: (loadN: number): string => formatQuantity(loadN, 'force', system.value, imperial.value ? { decimals: 0 } : { decimals: forceDecimals(loadN) }),
     forceNumber: (loadN: number): string => formatNumber(loadN, 'force', system.value, { decimals: imperial.value ? 0 : forceDecimals(loadN) }),

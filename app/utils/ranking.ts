@@ -45,7 +45,8 @@ export function stripScale(answer: RankingAnswer, unitN: number): StripScale {
   const loadN = answer.load.survey.totalN ?? 1000
   const low = Math.max(Math.min(loadN, ...strips.map(strip => strip.low90)) * 0.85, 20)
   const high = Math.max(loadN, ...strips.map(strip => strip.high90), low * 2) * 1.15
-  const scale = scaleLog([low, high], [0, 100]).clamp(true)
+  const place = scaleLog([low, high], [0, 100]).clamp(true)
+  const scale = (loadN: number): number => Math.round(place(loadN) * 100) / 100
   const ticks = [-2, -1, 0, 1, 2, 3, 4, 5].flatMap(power => roundSteps.map(step => step * 10 ** power))
     .filter(value => value * unitN > low * 1.05 && value * unitN < high / 1.05)
     .map(value => ({ x: scale(value * unitN), text: String(Number(value.toPrecision(1))) }))

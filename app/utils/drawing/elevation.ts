@@ -47,8 +47,8 @@ function bedSegments(seabeds: ElevationInput['seabeds'], width: number): BedSegm
   const total = seabeds.reduce((sum, { share }) => sum + share, 0) || 1
   let x = 0
   return seabeds.map(({ seabed, share }) => {
-    const segment = { seabed, x, width: width * share / total }
-    x += segment.width
+    const segment = { seabed, x: tenth(x), width: tenth(width * share / total) }
+    x += width * share / total
     return segment
   })
 }
@@ -58,6 +58,9 @@ function snubbed(points: readonly Point[], snubberM: number): { rode: Point[], s
   const [rode, last] = snubberM > 0 ? splitAt(points, lengthOf(points) - snubberM) : [[...points], []]
   return rode.length < 2 || last.length < 2 ? { rode: [...points], snubber: [] } : { rode, snubber: last }
 }
+
+/** To a tenth of a unit: finer is not seen, and two machines' last digits must not make two drawings. */
+const tenth = (value: number): number => Math.round(value * 10) / 10
 
 /**
  * Lays the whole scene out to scale: the same number of units for a metre across and up.
@@ -73,10 +76,10 @@ export function layElevation(input: ElevationInput, sheet: Sheet): Elevation {
   const fitting = (sheet.width - sheet.margin * 2) / acrossM
   const scale = Math.min(fitting, (sheet.height - sheet.bed - sheet.sky) / waterM)
   const sky = Math.max(sheet.sky, Math.min((boat.bowHeightM + boat.lengthM * 0.62) * scale, sheet.sky * 1.5))
-  const surfaceY = sky
-  const bedY = sky + waterM * scale
+  const surfaceY = tenth(sky)
+  const bedY = tenth(sky + waterM * scale)
   const left = sheet.margin + (fitting - scale) * acrossM / 2
-  const place = ([x, y]: Point): Point => [left + x * scale, bedY - y * scale]
+  const place = ([x, y]: Point): Point => [tenth(left + x * scale), tenth(bedY - y * scale)]
   const placeBoat = ([x, y]: Point): Point => place([spanM + x, waterM + y])
 
   const [chainPart, ropePart] = splitAt(curve, input.ropeM > 0 ? input.chainM : Infinity)

@@ -47,11 +47,13 @@ function readBoat(plan: TypedPlan, value: (key: QuantityKey) => number | undefin
   return completeBoat({
     ...base,
     ...given('windage', windage),
-    ...(Object.values(waterline).every(one => one === undefined) ? {} : { waterline: {
-      lengthM: waterline.lengthM ?? complete.waterline.lengthM,
-      beamM: waterline.beamM ?? complete.waterline.beamM,
-      draughtM: waterline.draughtM ?? complete.waterline.draughtM,
-    } }),
+    ...(Object.values(waterline).every(one => one === undefined)
+      ? {}
+      : { waterline: {
+          lengthM: waterline.lengthM ?? complete.waterline.lengthM,
+          beamM: waterline.beamM ?? complete.waterline.beamM,
+          draughtM: waterline.draughtM ?? complete.waterline.draughtM,
+        } }),
   })
 }
 

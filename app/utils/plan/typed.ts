@@ -29,7 +29,7 @@ const last = (query: Query, key: string): string | undefined => all(query, key).
 
 export const isSeabed = (text: string): text is Seabed => (seabeds as readonly string[]).includes(text)
 
-const startBeds: readonly TypedBed[] = [{ seabed: 'sandy-mud', share: '60 %' }, { seabed: 'weed-over-sand', share: '40 %' }]
+const startBeds: readonly TypedBed[] = [{ seabed: 'sandy-mud', share: '60 %' }, { seabed: 'loose-sand', share: '40 %' }]
 
 function readBeds(query: Query): TypedBed[] {
   const names = all(query, 'bed')

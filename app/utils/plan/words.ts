@@ -1,4 +1,5 @@
-import { boatTypes, chainGrades, exposures, rankingOrders, ropeConstructions, swells, targets, windKinds } from '#shared/types/words'
+import type { boatTypes, chainGrades, exposures, rankingOrders, ropeConstructions, swells, windKinds } from '#shared/types/words'
+import { targets } from '#shared/types/words'
 import type { QuantityKind } from '#shared/units/systems'
 
 /** The words of a plan: what each is called in the address, on the page and in a request, and what it says at first. */
