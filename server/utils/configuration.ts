@@ -1,3 +1,5 @@
+import { limitProblems } from './limits'
+
 /** What the server needs from its environment; every refusal names the variable. */
 export interface Configuration {
   demo: boolean
@@ -68,6 +70,7 @@ export function readConfiguration(env: Environment): Configuration {
     weak ? `NUXT_SESSION_PASSWORD ${weak}` : null,
     originProblem(appOrigin, demo),
     demo && !isLoopback(host) ? 'HOST must be 127.0.0.1 for the demo' : null,
+    ...limitProblems(env),
   ].filter(problem => problem !== null)
   if (problems.length) throw new ConfigurationError(problems)
   return { demo, databaseUrl, sessionPassword, appOrigin }

@@ -1,3 +1,4 @@
+import type { problemCodes } from '#shared/schemas/answers/problem'
 import { log } from './log'
 
 /** What every refusal looks like on the wire; never a validator's dump, a query or a stack. */
@@ -9,9 +10,7 @@ export interface Problem {
   fields?: Record<string, string>
 }
 
-export type ProblemCode =
-  | 'badRequest' | 'emptyBody' | 'notJson' | 'notFound' | 'methodNotAllowed' | 'tooSlow' | 'tooLarge' | 'unsupportedType'
-  | 'wrongHost' | 'invalid' | 'tooMany' | 'busy' | 'internal' | 'unavailable' | 'noFitYet'
+export type ProblemCode = (typeof problemCodes)[number]
 
 /** A refusal by our own rules: services and utilities throw it, one translator sends it. */
 export class ApiError extends Error {

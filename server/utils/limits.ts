@@ -7,26 +7,35 @@ type Environment = Record<string, string | undefined>
 
 export interface Limits { trustedProxies: number, perMinute: number, burst: number }
 
-function whole(env: Environment, name: string, fallback: number, minimum: number, maximum: number): number {
-  const text = env[name]
-  if (text === undefined || text === '') return fallback
-  const value = Number(text)
-  if (Number.isInteger(value) && value >= minimum && value <= maximum) return value
-  throw new Error(`${name} must be a whole number from ${minimum} to ${maximum}, not "${text}"`)
+interface Variable { name: string, fallback: number, minimum: number, maximum: number }
+
+const variables: Record<keyof Limits, Variable> = {
+  trustedProxies: { name: 'KEDGEWISE_TRUSTED_PROXIES', fallback: 0, minimum: 0, maximum: 10 },
+  perMinute: { name: 'KEDGEWISE_REQUESTS_PER_MINUTE', fallback: 600, minimum: 1, maximum: 10_000_000 },
+  burst: { name: 'KEDGEWISE_REQUESTS_BURST', fallback: 60, minimum: 1, maximum: 10_000_000 },
+}
+
+/** The variable's value; null where it is not a whole number in its range. */
+function valueOf(env: Environment, { name, fallback, minimum, maximum }: Variable): number | null {
+  const text = env[name] ?? ''
+  if (text === '') return fallback
+  const value = /^\d+$/.test(text) ? Number(text) : Number.NaN
+  return value >= minimum && value <= maximum ? value : null
+}
+
+/** What is wrong with the variables, each named: the server does not start with any. */
+export function limitProblems(env: Environment): string[] {
+  return Object.values(variables).filter(variable => valueOf(env, variable) === null)
+    .map(({ name, minimum, maximum }) => `${name} must be a whole number from ${minimum} to ${maximum}`)
 }
 
 /**
- * How much one address may ask. KEDGEWISE_REQUESTS_PER_MINUTE (600) tokens come back in a minute, KEDGEWISE_REQUESTS_BURST (60) may be
- * spent at once; KEDGEWISE_TRUSTED_PROXIES (0) says how many proxies of our own stand in front.
- *
- * @throws Error naming the variable that is not a whole number in its range
+ * How much one address may ask: so many requests come back in a minute, so many may be spent at once; and how many proxies of our own
+ * stand in front. A variable that is wrong counts as not set; limitProblems keeps a server from starting with one.
  */
 export function readLimits(env: Environment): Limits {
-  return {
-    trustedProxies: whole(env, 'KEDGEWISE_TRUSTED_PROXIES', 0, 0, 10),
-    perMinute: whole(env, 'KEDGEWISE_REQUESTS_PER_MINUTE', 600, 1, 10_000_000),
-    burst: whole(env, 'KEDGEWISE_REQUESTS_BURST', 60, 1, 10_000_000),
-  }
+  const value = (variable: Variable) => valueOf(env, variable) ?? variable.fallback
+  return { trustedProxies: value(variables.trustedProxies), perMinute: value(variables.perMinute), burst: value(variables.burst) }
 }
 
 /** Counts requests of an address; calls of our own rendering are free, since the page itself was counted. */

@@ -2,10 +2,16 @@ import * as z from 'zod/mini'
 import { fieldsOf } from '../fields'
 import { flag, words } from './figures'
 
+/** Words for programs: what kind of refusal it is. */
+export const problemCodes = [
+  'badRequest', 'emptyBody', 'notJson', 'notFound', 'methodNotAllowed', 'tooSlow', 'tooLarge', 'unsupportedType',
+  'wrongHost', 'invalid', 'tooMany', 'busy', 'internal', 'unavailable', 'noFitYet',
+] as const
+
 /** The one error shape. */
 export const problem = fieldsOf({
   statusCode: z.int(),
-  code: words('A word for programs'),
+  code: z.enum(problemCodes).check(z.describe('A word for programs')),
   message: words('A sentence for people'),
   fields: z.optional(z.record(z.string(), z.string()).check(z.describe('What is wrong with which field, by its dotted path'))),
 }, 'A refusal')
