@@ -76,7 +76,10 @@ function integrate(laplace: Laplace, mode: LogSds, peak: number, count: number, 
   const sds = new Float64Array(mode.length)
   const sums = lists.map(list => emptyMoments(list.contrasts.length))
   let total = 0
+  logEvidence(laplace, mode)
+  const { x, w } = laplace
   for (const { at, logDensity } of designPoints(shape, count)) {
+    Object.assign(laplace, { x, w })
     const weight = Math.exp(logEvidence(laplace, at) - peak - logDensity)
     if (weight < negligible) continue
     const fit = momentsHere(laplace, at, lists)
