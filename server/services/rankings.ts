@@ -3,11 +3,11 @@ import { rankDesigns } from '#shared/ranking/rank'
 import type { RankingAnswer, RankingRequest } from '#shared/types/ranking'
 import { standingEvidence } from './standing'
 
-/** What of a whole ranking an actor may read; `hidden` counts the rest. */
-export function readableRanking(actor: Actor, whole: RankingAnswer): RankingAnswer {
-  const rows = whole.rows.filter((row, index) => mayRead(actor, { what: 'rankingRow', place: row.rank ?? index + 1 }).allowed)
-  const thin = whole.thin.filter(() => mayRead(actor, { what: 'thinRow' }).allowed)
-  const own = whole.own && mayRead(actor, { what: 'ownRow' }).allowed ? whole.own : null
+/** What of a whole ranking an actor may read, as `may` decides it; `hidden` counts the rest. */
+export function readableRanking(actor: Actor, whole: RankingAnswer, may: typeof mayRead = mayRead): RankingAnswer {
+  const rows = whole.rows.filter((row, index) => may(actor, { what: 'rankingRow', place: row.rank ?? index + 1 }).allowed)
+  const thin = whole.thin.filter(() => may(actor, { what: 'thinRow' }).allowed)
+  const own = whole.own && may(actor, { what: 'ownRow' }).allowed ? whole.own : null
   const left = whole.rows.length - rows.length + whole.thin.length - thin.length
   return { ...whole, rows, thin, own, hidden: whole.hidden + left }
 }
