@@ -6,8 +6,8 @@ import { isNumbered, seabedFacts } from '#shared/seabed/seabeds'
 import { shiftCaution } from '#shared/seabed/cautions'
 import { shallowNote } from '#shared/rode/snubber'
 import { upliftFactor, publishedUpliftLimitRad } from '#shared/rode/uplift'
-import { mostlyUnnumbered, type MixSeabed } from './context'
-import { inPercent } from './plainWords'
+import { mostlyUnnumbered, type MixSeabed } from '#shared/ranking/context'
+import { inPercent } from '#shared/ranking/plainWords'
 
 /** True of every plan, in the words the product always uses. */
 export const standingCautions: readonly string[] = [

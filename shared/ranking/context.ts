@@ -1,8 +1,8 @@
 import type { SeabedFit, StoredFit } from '#shared/types/holding'
 import type { SeabedShare } from '#shared/types/ranking'
 import type { Seabed } from '#shared/types/words'
-import type { DemandPoint } from './chance'
-import type { DemandTable } from './speedSearch'
+import type { DemandPoint } from '#shared/ranking/chance'
+import type { DemandTable } from '#shared/ranking/speedSearch'
 
 /** One seabed of the mix with its estimates, null where the fit has no number for it. */
 export interface MixSeabed extends SeabedShare { fit: SeabedFit | null }

@@ -1,6 +1,6 @@
-import { demandPoint, unboundedDemand } from './chance'
-import type { AngleAt } from './rodeTable'
-import type { DemandTable } from './speedSearch'
+import { demandPoint, unboundedDemand } from '#shared/ranking/chance'
+import type { AngleAt } from '#shared/ranking/rodeTable'
+import type { DemandTable } from '#shared/ranking/speedSearch'
 
 const steps = 128
 

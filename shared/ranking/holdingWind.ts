@@ -1,9 +1,9 @@
 import type { HoldingWind } from '#shared/types/ranking'
 import type { LnPrediction } from '#shared/holding/predict'
 import { normalQuantile } from '#shared/stats/normal'
-import { holdingScore, type DemandPoint } from './chance'
-import type { PlanDemand } from './context'
-import { greatestSpeed } from './speedSearch'
+import { holdingScore, type DemandPoint } from '#shared/ranking/chance'
+import type { PlanDemand } from '#shared/ranking/context'
+import { greatestSpeed } from '#shared/ranking/speedSearch'
 
 /** The chance that a holding wind stands for: nine of ten separate anchorings, each properly set on its own day. */
 export const holdingWindChance = 0.9

@@ -2,9 +2,9 @@ import type { RankedRow } from '#shared/types/ranking'
 import type { RankingOrder } from '#shared/types/words'
 import { designIndex, lnDifference } from '#shared/holding/predict'
 import { normalCdf } from '#shared/stats/normal'
-import type { MixSeabed } from './context'
-import { windRank } from './holdingWind'
-import type { Candidate } from './row'
+import type { MixSeabed } from '#shared/ranking/context'
+import { windRank } from '#shared/ranking/holdingWind'
+import type { Candidate } from '#shared/ranking/row'
 
 /** Between these chances of the upper row's median being the higher one, the order of two rows is a coin-toss. */
 export const coinToss = { low: 0.35, high: 0.65 } as const

@@ -9,9 +9,9 @@ import { answerRode } from '#shared/rode/answer'
 import { clearanceM, heightToBow, swingRadiusM } from '#shared/rode/height'
 import { snubberAdvice } from '#shared/rode/snubber'
 import { FieldError } from '#shared/utils/fieldError'
-import { planCautions } from './cautions'
-import { answerLoads } from './planLoad'
-import { withRodeFields } from './rodeFields'
+import { planCautions } from '#shared/ranking/cautions'
+import { answerLoads } from '#shared/ranking/planLoad'
+import { withRodeFields } from '#shared/ranking/rodeFields'
 
 /** A rode without any load has no shape to solve: calm is taken as a hundredth of a newton. */
 const calmN = 0.01

@@ -8,11 +8,11 @@ import { surgeReader } from '#shared/rode/surge'
 import { publishedUpliftLimitRad, upliftFactor } from '#shared/rode/uplift'
 import { solverInput } from '#shared/rode/weights'
 import { KN_MS } from '#shared/units/constants'
-import { demandPoint, type DemandPoint } from './chance'
-import type { PlanDemand } from './context'
-import { tabulateDemand } from './demand'
-import { tabulateAngle, type AngleAt } from './rodeTable'
-import { greatestSpeed, type DemandTable } from './speedSearch'
+import { demandPoint, type DemandPoint } from '#shared/ranking/chance'
+import type { PlanDemand } from '#shared/ranking/context'
+import { tabulateDemand } from '#shared/ranking/demand'
+import { tabulateAngle, type AngleAt } from '#shared/ranking/rodeTable'
+import { greatestSpeed, type DemandTable } from '#shared/ranking/speedSearch'
 
 /** The greatest wind said as a number, m/s: 64 kn, as a gust for holding winds, as entered for the table load (ours). */
 export const greatestWindMs = 64 * KN_MS

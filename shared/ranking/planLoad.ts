@@ -6,7 +6,7 @@ import { surveyLoad, windLoads } from '#shared/load/survey'
 import { tableLoad } from '#shared/load/table'
 import { surgePeak } from '#shared/rode/surge'
 import { FieldError } from '#shared/utils/fieldError'
-import { withRodeFields } from './rodeFields'
+import { withRodeFields } from '#shared/ranking/rodeFields'
 
 /** What completeBoat may have guessed, in words. */
 const guessedWords: Readonly<Record<string, string>> = {

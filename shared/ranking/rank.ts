@@ -1,14 +1,14 @@
 import type { StoredFit } from '#shared/types/holding'
 import type { CatalogueDesign, RankedRow, RankingAnswer, RankingRequest } from '#shared/types/ranking'
 import { FieldError } from '#shared/utils/fieldError'
-import { anchoringVariance } from './chance'
-import { fitCautions } from './cautions'
-import { mixWithEstimates, mostlyUnnumbered, type RankContext } from './context'
-import { areTied, orderRows } from './order'
-import { planGround } from './plan'
-import { planDemand } from './planDemand'
-import { buildRow, type Candidate } from './row'
-import { judgeOwn } from './verdict'
+import { anchoringVariance } from '#shared/ranking/chance'
+import { fitCautions } from '#shared/ranking/cautions'
+import { mixWithEstimates, mostlyUnnumbered, type RankContext } from '#shared/ranking/context'
+import { areTied, orderRows } from '#shared/ranking/order'
+import { planGround } from '#shared/ranking/plan'
+import { planDemand } from '#shared/ranking/planDemand'
+import { buildRow, type Candidate } from '#shared/ranking/row'
+import { judgeOwn } from '#shared/ranking/verdict'
 
 /** The chance that a size is asked to reach where the reader names none. */
 export const defaultTarget = 0.9

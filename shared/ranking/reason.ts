@@ -1,8 +1,8 @@
 import type { RankedRow, RankedSeabed } from '#shared/types/ranking'
 import { seabedFacts } from '#shared/seabed/seabeds'
-import type { RankContext } from './context'
-import { hasEvidence, leastDays, leastPulls } from './evidence'
-import { chanceInWords, counted, inKg, inKn, inPercent, inWords } from './plainWords'
+import type { RankContext } from '#shared/ranking/context'
+import { hasEvidence, leastDays, leastPulls } from '#shared/ranking/evidence'
+import { chanceInWords, counted, inKg, inKn, inPercent, inWords } from '#shared/ranking/plainWords'
 
 /** Below this uplift factor the rode's angle is what would change the answer first. */
 const muchLost = 0.9

@@ -1,9 +1,9 @@
 import type { CatalogueDesign, RankedRow, RankedSeabed } from '#shared/types/ranking'
-import { isNumberedMix, type RankContext } from './context'
-import { hasEvidence } from './evidence'
-import { windRank } from './holdingWind'
-import { explainRow } from './reason'
-import { judgeSize, rankSeabed, type SizeResult } from './seabedRow'
+import { isNumberedMix, type RankContext } from '#shared/ranking/context'
+import { hasEvidence } from '#shared/ranking/evidence'
+import { windRank } from '#shared/ranking/holdingWind'
+import { explainRow } from '#shared/ranking/reason'
+import { judgeSize, rankSeabed, type SizeResult } from '#shared/ranking/seabedRow'
 
 /** A row with what ordering and judging it need. */
 export interface Candidate {

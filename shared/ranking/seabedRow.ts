@@ -2,9 +2,9 @@ import type { DesignEstimate } from '#shared/types/holding'
 import type { RankedSeabed } from '#shared/types/ranking'
 import { designIndex, massFactor, predictAt, type LnPrediction } from '#shared/holding/predict'
 import { normalCdf, z90 } from '#shared/stats/normal'
-import { holdingScore } from './chance'
-import { isNumberedMix, type MixSeabed, type NumberedMix, type RankContext } from './context'
-import { findHoldingWind, findTableWind, meetsTable } from './holdingWind'
+import { holdingScore } from '#shared/ranking/chance'
+import { isNumberedMix, type MixSeabed, type NumberedMix, type RankContext } from '#shared/ranking/context'
+import { findHoldingWind, findTableWind, meetsTable } from '#shared/ranking/holdingWind'
 
 /**
  * The mass that holding at another is scaled from: the nearest one pulled, where the anchor's lies outside 0.5 to 2 times

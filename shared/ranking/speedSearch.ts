@@ -1,4 +1,4 @@
-import type { DemandPoint } from './chance'
+import type { DemandPoint } from '#shared/ranking/chance'
 
 /** What the rode passes on by wind speed: at the grid's speeds (m/s, rising from 0), and at any speed between. */
 export interface DemandTable {

@@ -1,6 +1,6 @@
 import type { Verdict } from '#shared/types/ranking'
-import { mostlyUnnumbered, type RankContext } from './context'
-import type { Candidate } from './row'
+import { mostlyUnnumbered, type RankContext } from '#shared/ranking/context'
+import type { Candidate } from '#shared/ranking/row'
 
 /** Below this chance on its worst seabed an anchor does not hold. */
 export const doesNotHoldBelow = 0.5

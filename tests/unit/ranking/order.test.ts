@@ -1,7 +1,10 @@
 import { describe, expect, it } from 'vitest'
+import { solveRode } from '#shared/rode/catenary'
+import { demandPoint, holdingScore } from '#shared/ranking/chance'
 import { areTied } from '#shared/ranking/order'
 import { rankDesigns } from '#shared/ranking/rank'
 import { judgeOwn } from '#shared/ranking/verdict'
+import { normalCdf } from '#shared/stats/normal'
 import type { DesignEstimate } from '#shared/types/holding'
 import type { RankedRow, RankingAnswer } from '#shared/types/ranking'
 import { KN_MS } from '#shared/units/constants'
@@ -23,6 +26,17 @@ describe('ties', () => {
     // the same difference known better, though each of the two is as unsure as before
     const close = { lnSd: 0.02 }
     expect(shape(rank([makeEstimate('alder', 3090, close), makeEstimate('birch', 3000, close)], 0.0096))).toEqual([['alder', false], ['birch', false]])
+  })
+
+  it('are judged on the lower row\'s worst seabed', () => {
+    // alder's worst is mud, birch's is sand: on sand the two are a coin-toss, on mud birch is twice as good
+    const twoSeabeds = makeFit([
+      makeSeabedFit('loose-sand', [makeEstimate('alder', 3090), makeEstimate('birch', 3000)]),
+      makeSeabedFit('firm-mud', [makeEstimate('alder', 3050), makeEstimate('birch', 6100)]),
+    ])
+    const plan = makePlan({ seabeds: [{ seabed: 'loose-sand', share: 0.5 }, { seabed: 'firm-mud', share: 0.5 }] })
+    const { rows } = rankDesigns(plan, [makeDesign('alder'), makeDesign('birch')], twoSeabeds)
+    expect(rows.map(({ design, worst, tiedWithNext }) => [design, worst?.seabed, tiedWithNext])).toEqual([['alder', 'firm-mud', true], ['birch', 'loose-sand', false]])
   })
 
   it('bracket rows at the same cap, and not at caps far apart', () => {
@@ -72,6 +86,30 @@ describe('holding winds', () => {
     expect(gustMs).toBeLessThan(64 * KN_MS)
     expect(ranked(gustMs - 0.01).rows[0]?.seabeds[0]?.chance).toBeGreaterThan(0.99)
     expect(ranked(gustMs + 0.01).rows).toEqual([])
+  })
+})
+
+describe('the chance on a rode hardly longer than the height', () => {
+  // 48 m of chain to a height of 40 m, 9 N per square of the wind in m/s: between 5 and 6 m/s the shank goes past 25 degrees
+  const seabed = makeSeabedFit('loose-sand', [makeEstimate('alder', Math.exp(6))])
+  const chanceAt = (speedMs: number) => rankDesigns(makePlan({
+    boat: { type: 'sailMonohull', lengthM: 10, beamM: 3, bowHeightM: 1, windage: [{ part: 'all', areaM2: 9 / 0.6125, dragCoefficient: 1 }] },
+    wind: { speedMs, kind: 'gust', sheerDeg: 0 },
+    rode: { chain: { lengthM: 48, submergedWeightNPerM: 18 } },
+    depthM: 39,
+    massKg: 15,
+  }), [makeDesign('alder')], makeFit([seabed], { sigma: 0.158 })).rows[0]?.seabeds[0]?.chance ?? Number.NaN
+
+  it('does not rise with the wind, though the formula alone would there', () => {
+    const formulaAt = (speedMs: number) => {
+      const loadN = 9 * speedMs ** 2
+      const { shankAngleRad } = solveRode({ heightM: 40, horizontalLoadN: loadN, chain: { lengthM: 48, weightNPerM: 18 } })
+      return normalCdf(holdingScore({ mean: 6, variance: 0.01 }, demandPoint(loadN, shankAngleRad), 0.15))
+    }
+    const winds = Array.from({ length: 17 }, (_, i) => 4 + i / 4)
+    expect(winds.some((wind, i) => i > 0 && formulaAt(wind) > 0.01 && formulaAt(wind) > formulaAt(winds[i - 1] ?? 0))).toBe(true)
+    winds.forEach((wind, i) => expect(chanceAt(wind)).toBeLessThanOrEqual(chanceAt(winds[i - 1] ?? wind) + 1e-6))
+    expect(chanceAt(4)).toBeCloseTo(formulaAt(4), 4)
   })
 })
 
