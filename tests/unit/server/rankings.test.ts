@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest'
-import { mayRead, visitor } from '#shared/access/mayRead'
+import { visitor, type mayRead } from '#shared/access/mayRead'
 import type { RankedRow, RankingAnswer } from '#shared/types/ranking'
 import { readableRanking } from '../../../server/services/rankings'
 
