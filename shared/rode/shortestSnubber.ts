@@ -1,4 +1,4 @@
-import type { Rode, Snubber } from '#shared/types/rode'
+import type { Rode, ShortestSnubber, Snubber } from '#shared/types/rode'
 import { ropeBreakingN } from './breaking'
 import { breakingLoad } from './breakingLoad'
 import { solveRode, type RodeInput } from './catenary'
@@ -8,9 +8,6 @@ import { forceCurve } from './forceCurve'
 import { giveOf } from './give'
 import { ropeStiffnessN } from './stiffness'
 import { solverInput } from './weights'
-
-/** Shortest length, m, or null; and why, or what to do instead, in words. */
-export interface ShortestSnubber { lengthM: number | null, note?: string }
 
 /** A rode without its snubber, the snubber's rope, seabed to bow in m, steady horizontal load in N, energy in J. */
 export interface ShortestRequest { rode: Rode, snubber: Snubber, heightM: number, steadyN: number, energyJ: number }

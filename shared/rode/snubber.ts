@@ -1,11 +1,11 @@
-import type { Rode, Snubber } from '#shared/types/rode'
+import type { Rode, Snubber, SnubberAdvice } from '#shared/types/rode'
 import { mustBeWithin } from '#shared/utils/fieldError'
 import { ropeBreakingN } from './breaking'
 import { solveRode } from './catenary'
 import { ropeStiffnessN } from './stiffness'
 import { ropeAllowedN } from './strength'
-import { surgePeak, type SurgePeak } from './surge'
-import { shortestSnubber, type ShortestSnubber } from './shortestSnubber'
+import { surgePeak } from './surge'
+import { shortestSnubber } from './shortestSnubber'
 import { solverInput } from './weights'
 
 /** What snubberAdvice takes: loads horizontal, N; designN null where the surge has no bound. */
@@ -18,22 +18,6 @@ export interface SnubberRequest {
   /** the load that the surge starts from, N */
   steadyN: number
   energyJ: number
-}
-
-/** What the snubber does. Every figure is null where it is unknown or there is no snubber. */
-export interface SnubberAdvice {
-  /** at the design load, m, and as a share of its length */
-  stretchM: number | null
-  stretchShare: number | null
-  peakWith: SurgePeak | null
-  peakWithout: SurgePeak
-  breakingN: number | null
-  allowedN: number | null
-  /** whether it may carry the tension at the bow under the design load; unknown is null, never ok */
-  ok: boolean | null
-  shortest: ShortestSnubber | null
-  /** sentences for the reader */
-  notes: string[]
 }
 
 export const shallowNote = 'Shallow water needs more scope and a longer snubber, not less.'

@@ -1,4 +1,4 @@
-import type { Rode } from '#shared/types/rode'
+import type { Rode, SurgePeak } from '#shared/types/rode'
 import { mustBeWithin } from '#shared/utils/fieldError'
 import { breakingLoad } from './breakingLoad'
 import { solveRode, type RodeInput } from './catenary'
@@ -7,9 +7,6 @@ import { peakOn } from './energyPeak'
 import { forceCurve } from './forceCurve'
 import { giveOf, nothingLeft, type Give, type NoGive } from './give'
 import { solverInput } from './weights'
-
-/** Greatest horizontal load of a surge, N; or none, why, and the field that would help, where one would. */
-export type SurgePeak = { peakN: number } | { peakN: null, why: string, field?: string }
 
 /** Reads the peak for a steady load in N (0 to 1e9) and an energy in J (0 to 1e12): microseconds each. */
 export type SurgeReader = (steadyN: number, energyJ: number) => SurgePeak

@@ -1,7 +1,6 @@
-import type { SnubberAdvice } from '#shared/rode/snubber'
 import type { Boat, LoadAnswer } from './load'
 import type { RuleTableEntry } from './ranking'
-import type { RodeAnswer } from './rode'
+import type { RodeAnswer, SnubberAdvice } from './rode'
 
 /** What a ranking starts from: everything of a plan that needs no estimates, besides advice on the snubber. */
 export interface PlanGround {

@@ -62,3 +62,25 @@ export interface RodeAnswer {
   strength: StrengthPart[]
   weakest: string | null
 }
+
+/** Greatest horizontal load of a surge, N; or none, why, and the field that would help, where one would. */
+export type SurgePeak = { peakN: number } | { peakN: null, why: string, field?: string }
+
+/** Shortest length, m, or null; and why, or what to do instead, in words. */
+export interface ShortestSnubber { lengthM: number | null, note?: string }
+
+/** What the snubber does. Every figure is null where it is unknown or there is no snubber. */
+export interface SnubberAdvice {
+  /** at the design load, m, and as a share of its length */
+  stretchM: number | null
+  stretchShare: number | null
+  peakWith: SurgePeak | null
+  peakWithout: SurgePeak
+  breakingN: number | null
+  allowedN: number | null
+  /** whether it may carry the tension at the bow under the design load; unknown is null, never ok */
+  ok: boolean | null
+  shortest: ShortestSnubber | null
+  /** sentences for the reader */
+  notes: string[]
+}

@@ -4,7 +4,7 @@ import { FieldError } from '#shared/utils/fieldError'
 import { answerPlan } from '#shared/ranking/plan'
 import { answerRode } from '#shared/rode/answer'
 import { snubberAdvice } from '#shared/rode/snubber'
-import type { SnubberAdvice } from '#shared/rode/snubber'
+import type { SnubberAdvice } from '#shared/types/rode'
 import type { Issue, Strongpoints } from '~/utils/plan/read'
 import { quantityKeys, quantityWords, windageKeyList, windageKeys } from '~/utils/plan/words'
 
