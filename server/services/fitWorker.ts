@@ -33,5 +33,6 @@ function inWorker<Answer>(task: FitTask, limitMs: number, signal?: AbortSignal):
 export const runRefit = (pulls: PullRecord[], signal?: AbortSignal) =>
   inWorker<HoldingFit>({ kind: 'refit', pulls }, 600_000, signal)
 
-/** What would these pulls say? At most 30 s, then FitTimeout. */
-export const runFit = (request: FitRequest) => inWorker<FitAnswer>({ kind: 'ask', request }, 30_000)
+/** What would these pulls say? At most 30 s, then FitTimeout; ended when nobody waits for it any more. */
+export const runFit = (request: FitRequest, signal?: AbortSignal) =>
+  inWorker<FitAnswer>({ kind: 'ask', request }, 30_000, signal)

@@ -17,7 +17,7 @@ const turns = new Turns(mostWaiting)
  */
 export async function fits(request: FitRequest, gone?: AbortSignal, run: typeof runFit = runFit, line: Turns = turns): Promise<FitAnswer> {
   try {
-    return await line.run(() => run(request), gone)
+    return await line.run(() => run(request, gone), gone)
   }
   catch (error) {
     if (error instanceof NoPlace) {
