@@ -204,6 +204,7 @@ CREATE TABLE "fits" (
 	"sigma" double precision NOT NULL,
 	"sds" jsonb NOT NULL,
 	"created_at" timestamp with time zone DEFAULT now() NOT NULL,
+	"stands_from" timestamp with time zone,
 	CONSTRAINT "fits_model_data" UNIQUE("model_version","data_hash"),
 	CONSTRAINT "fits_sigma_range" CHECK ("fits"."sigma" between 0 and 100)
 );

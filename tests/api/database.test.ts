@@ -1,7 +1,7 @@
 import pg from 'pg'
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import { connect, type Connection } from '../../server/db/client'
-import { fitIdFor, insertFit, newestFitId, readFit } from '../../server/db/queries/fits'
+import { fitIdFor, insertFit, letStand, newestFitId, readFit } from '../../server/db/queries/fits'
 import { countRigs, publishedPulls } from '../../server/db/queries/pulls'
 import { transact } from '../../server/db/transact'
 import { openQueue, queues, startQueue } from '../../server/jobs/queue'
@@ -75,6 +75,12 @@ describe('what is written comes back', () => {
     expect(await fitIdFor(db, fit.modelVersion, fit.dataHash)).toBe(id)
     await expect(db.transaction(tx => insertFit(tx, fit))).rejects.toThrow()
     const second = await db.transaction(tx => insertFit(tx, { ...fit, dataHash: 'another' }))
+    // A stored fit is not the readers' one until it is let stand, and an older one can stand again.
+    expect(await newestFitId(db)).toBe(id)
+    await db.transaction(tx => letStand(tx, second))
+    expect(await newestFitId(db)).toBe(second)
+    await db.transaction(tx => letStand(tx, id ?? 0))
+    expect(await newestFitId(db)).toBe(id)
     const { id: _first, at: _at, ...body } = fit
     expect(await readFit(db, second)).toMatchObject({ ...body, dataHash: 'another' })
   })

@@ -1,4 +1,4 @@
-import { and, asc, desc, eq, inArray, isNull, sql } from 'drizzle-orm'
+import { and, asc, desc, eq, inArray, isNotNull, isNull, sql } from 'drizzle-orm'
 import type { DesignEstimate, HoldingFit, ModificationEstimate, SeabedFit, StoredFit } from '../../../shared/types/holding'
 import type { Family, NumberedSeabed } from '../../../shared/types/words'
 import type { Database, Transaction } from '../client'
@@ -7,10 +7,17 @@ import { covariances, designs, estimates, fits, modifications } from '../schema'
 /** The channel that tells every instance of a new fit. */
 export const fitChannel = 'kedgewise_fit'
 
-/** The number of the newest fit, or null. */
+/** The number of the fit that readers are answered from: the one that stands since last; null while there is none. */
 export async function newestFitId(db: Database | Transaction): Promise<number | null> {
-  const [row] = await db.select({ id: fits.id }).from(fits).orderBy(desc(fits.id)).limit(1)
+  const [row] = await db.select({ id: fits.id }).from(fits).where(isNotNull(fits.standsFrom))
+    .orderBy(desc(fits.standsFrom), desc(fits.id)).limit(1)
   return row?.id ?? null
+}
+
+/** Lets readers be answered from a stored fit from now on, and tells every instance when the transaction commits. */
+export async function letStand(tx: Transaction, fitId: number): Promise<void> {
+  await tx.update(fits).set({ standsFrom: sql`clock_timestamp()` }).where(eq(fits.id, fitId))
+  await tx.execute(sql`select pg_notify(${fitChannel}, ${String(fitId)})`)
 }
 
 /** The number of the fit made from this very data under this model, or null. */
@@ -37,7 +44,7 @@ function estimateRow(fitId: number, seabed: string, designId: number, estimate: 
   }
 }
 
-/** Stores a fit whole, in the transaction given, and tells the other instances when that commits. */
+/** Stores a fit whole, in the transaction given; readers are answered from it once letStand() says so. */
 export async function insertFit(tx: Transaction, fit: HoldingFit): Promise<number> {
   const designIds = new Map((await tx.select({ id: designs.id, slug: designs.slug }).from(designs)).map(row => [row.slug, row.id]))
   const modificationIds = new Map((await tx.select({ id: modifications.id, slug: modifications.slug }).from(modifications)).map(row => [row.slug, row.id]))
@@ -69,7 +76,6 @@ export async function insertFit(tx: Transaction, fit: HoldingFit): Promise<numbe
       values: part.covariance,
     })))
   }
-  await tx.execute(sql`select pg_notify(${fitChannel}, ${String(fitId)})`)
   return fitId
 }
 

@@ -14,6 +14,8 @@ export const fits = pgTable('fits', {
   sigma: doublePrecision().notNull(),
   sds: jsonb().$type<HoldingSds>().notNull(),
   createdAt: moment('created_at').notNull().defaultNow(),
+  /** since when readers are answered from it; null: made for a release only, or not yet */
+  standsFrom: moment('stands_from'),
 }, table => [
   unique('fits_model_data').on(table.modelVersion, table.dataHash),
   within('fits_sigma_range', table.sigma, 0, 100),
