@@ -11,7 +11,7 @@ import { makeWorld } from './world'
 import { writeWorld } from './write'
 
 const fact = 'demo world'
-const tables = 'covariances, estimates, fits, pulls, trials, rigs, modifications, sizes, designs, families, seabeds, facts'
+const tables = 'trial_replies, pull_questions, releases, covariances, estimates, fits, pulls, trials, rigs, modifications, sizes, designs, families, seabeds, facts'
 
 async function seed(url: string): Promise<string> {
   await applyMigrations(url, fileURLToPath(new URL('../drizzle', import.meta.url)))

@@ -64,4 +64,13 @@ export const modifications = pgTable('modifications', {
   slug: text().notNull().unique(),
   name: text().notNull(),
   description: text().notNull().default(''),
-}, table => [isSlug('modifications_slug_form', table.slug)])
+  /** what the change adds to an anchor of 20 kg, and what it costs, where known; null is "not stated" */
+  addedMassKg: quantity('added_mass_kg'),
+  priceMinor: integer('price_minor'),
+  priceCurrency: char('price_currency', { length: 3 }),
+  priceOn: date('price_on', { mode: 'string' }),
+}, table => [
+  isSlug('modifications_slug_form', table.slug),
+  within('modifications_added_mass_range', table.addedMassKg, -500, 500),
+  check('modifications_price_whole', sql`(${table.priceMinor} is null) = (${table.priceCurrency} is null) and (${table.priceMinor} is null) = (${table.priceOn} is null)`),
+])

@@ -44,6 +44,7 @@ export const estimates = pgTable('estimates', {
 }, table => [
   uniqueIndex('estimates_one_each').on(table.fitId, table.designId, table.seabed, sql`coalesce(${table.modificationId}, 0)`),
   index('estimates_fit_seabed').on(table.fitId, table.seabed),
+  index('estimates_fit_modification').on(table.fitId, table.modificationId).where(sql`modification_id is not null`),
   oneOf('estimates_seabed_numbered', table.seabed, numberedSeabeds),
   oneOf('estimates_verdict_known', table.verdict, ['better', 'worse', 'noDifference', 'cannotTell']),
   within('estimates_sd_range', table.lnSd, 0, 100),

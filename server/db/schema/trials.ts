@@ -60,6 +60,8 @@ export const trials = pgTable('trials', {
   within('trials_depth_range', table.depthM, 0.5, 100),
   within('trials_wind_range', table.windMs, 0, 60),
   within('trials_current_range', table.currentMs, 0, 5),
+  index('trials_published').on(table.publishedAt),
+  index('trials_rig').on(table.rigId),
   within('trials_wave_range', table.waveHeightM, 0, 20),
 ])
 
@@ -98,6 +100,7 @@ export const pulls = pgTable('pulls', {
   unique('pulls_trial_ordinal').on(table.trialId, table.ordinal),
   index('pulls_design_seabed').on(table.designId, table.seabed),
   index('pulls_seabed').on(table.seabed),
+  index('pulls_modification').on(table.modificationId).where(sql`modification_id is not null`),
   oneOf('pulls_seabed_numbered', table.seabed, numberedSeabeds),
   oneOf('pulls_setting_known', table.setting, settingOutcomes),
   oneOf('pulls_end_known', table.end, pullEnds),
