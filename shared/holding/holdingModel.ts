@@ -71,14 +71,13 @@ export function holdingModel(pulls: readonly PullRecord[], options: HoldingModel
   if (fitted.length === 0) throw new RangeError('pulls that set must be at least 1, got 0')
   const likelihood = options.likelihood ?? false
   const records = fitted.map(({ pull }) => pull)
-  const columns = columnsOf(records, likelihood)
+  const columns = columnsOf(records)
   const columnOf = new Map(columns.map((column, index) => [column.key, index]))
   const groups = sdNames.filter(name => name === 'anchorDay' || columns.some(column => column.kind === name))
   const rank = new Map<number, number>(groups.map((name, index) => [groupOf(name), index]))
   const days = numbered(records.map(anchorDayKey))
   const centre = centreOf(fitted)
   const known = (end: number, pull: PullRecord): number => Math.log(end) - centre - publishedPart(pull)
-  const fixed = columns.filter(column => column.kind === 'seabed' || column.kind === 'exponent').length
   const mixed: MixedModel = {
     lo: Float64Array.from(fitted, ({ pull, interval }) => known(interval.heldN, pull)),
     hi: Float64Array.from(fitted, ({ pull, interval }) => known(interval.movedN, pull)),
@@ -91,7 +90,7 @@ export function holdingModel(pulls: readonly PullRecord[], options: HoldingModel
     groups: groups.length,
     sdScale: new Float64Array(groups.length).fill(likelihood ? Infinity : sdPriorScale),
     sigmaScale: likelihood ? Infinity : sigmaPriorScale,
-    integrated: columns.length - (likelihood ? fixed : 0),
+    maximised: Uint8Array.from(columns, ({ kind }) => (likelihood && (kind === 'seabed' || kind === 'exponent') ? 1 : 0)),
   }
   return { mixed, centre, columnOf, groups, fitted: records }
 }

@@ -11,11 +11,11 @@ function classCurvatures(laplace: Laplace): Float64Array {
 /** Adds a class's curvature between its effects. */
 function addClass(laplace: Laplace, i: number, sum: number): void {
   const { rowStart, cols, coefs } = laplace.model
-  const { base, values } = laplace.structure.matrix
+  const { size, values } = laplace.structure.matrix
   const from = rowStart[i]!
   const to = rowStart[i + 1]!
   for (let s = from; s < to; s++) {
-    const row = base[cols[s]!]!
+    const row = cols[s]! * size
     const weight = sum * coefs[s]!
     for (let t = from; t <= s; t++) values[row + cols[t]!]! += weight * coefs[t]!
   }
@@ -36,7 +36,7 @@ function eliminateDay(laplace: Laplace, d: number, sums: Float64Array): void {
   }
   laplace.dayCurvature[d] = own
   for (let s = from; s < to; s++) {
-    const row = matrix.base[dayCols[s]!]!
+    const row = dayCols[s]! * matrix.size
     const share = cross[s]! / own
     for (let t = from; t <= s; t++) matrix.values[row + dayCols[t]!]! -= share * cross[t]!
   }
@@ -48,10 +48,10 @@ function eliminateDay(laplace: Laplace, d: number, sums: Float64Array): void {
  */
 export function assemble(laplace: Laplace): void {
   const { model, structure, precision } = laplace
-  const { base, values } = structure.matrix
+  const { size, values } = structure.matrix
   const sums = classCurvatures(laplace)
   values.fill(0)
-  for (let k = 0; k < precision.length; k++) values[base[k]! + k] = precision[k]!
+  for (let k = 0; k < precision.length; k++) values[k * size + k] = precision[k]!
   for (let c = 0; c < sums.length; c++) addClass(laplace, structure.example[c]!, sums[c]!)
   for (let d = 0; d < model.days; d++) eliminateDay(laplace, d, sums)
 }

@@ -1,3 +1,4 @@
+import { solveForward } from '#shared/stats/sparseCholesky'
 import type { Laplace } from '#shared/stats/laplace'
 
 /**
@@ -14,24 +15,13 @@ export interface UnseenEffect { id: number, group: number, knownSd: number }
 /** Posterior mean and covariance (row-major) of a list of contrasts. */
 export interface Moments { mean: Float64Array, covariance: Float64Array }
 
-/** L^-1 y in place, column by column, so that only places which hold something are worked on. */
-function solveSparse(laplace: Laplace, y: Float64Array): void {
-  const { matrix, columnRows } = laplace.structure
-  for (let j = 0; j < y.length; j++) {
-    if (y[j] === 0) continue
-    const value = y[j]! / matrix.values[matrix.base[j]! + j]!
-    y[j] = value
-    for (const i of columnRows[j]!) y[i]! -= matrix.values[matrix.base[i]! + j]! * value
-  }
-}
-
 /** L^-1 z of each contrast z, kept only at the places where any of them holds something. */
 function halves(laplace: Laplace, contrasts: readonly Contrast[]): Float64Array[] {
   const used = new Uint8Array(laplace.x.length)
   const full = contrasts.map((contrast) => {
     const y = new Float64Array(laplace.x.length)
-    for (const col of contrast.cols) y[col]! += 1
-    solveSparse(laplace, y)
+    for (const col of contrast.cols) y[laplace.position[col]!]! += 1
+    solveForward(laplace.structure.matrix, y)
     for (let k = 0; k < y.length; k++) if (y[k] !== 0) used[k] = 1
     return y
   })
@@ -64,7 +54,7 @@ export function contrastList(contrasts: readonly Contrast[]): ContrastList {
 export function contrastMoments(laplace: Laplace, list: ContrastList, centre: Float64Array, groupSds: Float64Array): Moments {
   const size = list.contrasts.length
   const half = halves(laplace, list.contrasts)
-  const mean = Float64Array.from(list.contrasts, contrast => contrast.cols.reduce((sum, col) => sum + centre[col]!, 0))
+  const mean = Float64Array.from(list.contrasts, contrast => contrast.cols.reduce((sum, col) => sum + centre[laplace.position[col]!]!, 0))
   const covariance = new Float64Array(size * size)
   for (let i = 0; i < size; i++) {
     for (let j = 0; j <= i; j++) {

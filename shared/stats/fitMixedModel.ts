@@ -32,8 +32,13 @@ export interface MixedFitOptions {
 const leastSd = 1e-4
 const greatestSd = 10
 
-/** Enough for means of the sds to about a tenth of their posterior sd. */
-const defaultPoints = 96
+/**
+ * Points of the integration unless the caller says: enough for means of the sds to about a tenth of their posterior sd, and more
+ * where they cost little and the sds are least known.
+ */
+function usualPoints(observations: number): number {
+  return Math.min(256, Math.max(96, Math.round(32_768 / observations)))
+}
 
 /** Points that weigh less than this (the mode weighs about 1) are left out. */
 const negligible = 0.01
@@ -41,7 +46,7 @@ const negligible = 0.01
 /** Evidence and its gradient; by differences where some effects are maximised, not integrated. */
 function evidenceOf(laplace: Laplace): { f: SmoothFunction, gradient: Gradient } {
   const f: SmoothFunction = at => logEvidence(laplace, at)
-  const whole = laplace.model.integrated === laplace.x.length
+  const whole = !laplace.model.maximised.includes(1)
   return { f, gradient: whole ? at => evidenceGradient(laplace, at) : numericGradient(f) }
 }
 
@@ -101,7 +106,7 @@ function integrate(laplace: Laplace, mode: LogSds, peak: number, count: number, 
 export function fitMixedModel(model: MixedModel, wanted: readonly (readonly Contrast[])[], options: MixedFitOptions = {}): MixedFit {
   const lists = wanted.map(contrastList)
   const laplace = makeLaplace(model)
-  const count = options.points ?? defaultPoints
+  const count = options.points ?? usualPoints(model.lo.length)
   let at: LogSds = Float64Array.from(options.sds ?? [], Math.log)
   if (options.sds === undefined) {
     const mode = searchMode(laplace)

@@ -38,9 +38,9 @@ function covariance(hessian: Float64Array[]): Float64Array[] {
   }
 }
 
-/** Spread on one side: what a normal density would need to fall as the true one does, one and a half sd along the axis. */
+/** Spread on one side: what a normal density would need to fall as the true one does, two and a half sd along the axis. */
 function spread(f: SmoothFunction, mode: Float64Array, peak: number, direction: Float64Array, sd: number): number {
-  const reach = 1.5
+  const reach = 2.5
   const drop = peak - f(mode.map((value, k) => value + reach * direction[k]!))
   const factor = Math.sqrt(0.5 * reach ** 2 / Math.max(drop, 1e-3))
   return sd * Math.min(Math.max(factor, 0.5), 3)

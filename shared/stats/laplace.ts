@@ -1,11 +1,16 @@
 import { checkModel } from '#shared/stats/mixedModel'
 import type { LogSds, MixedModel } from '#shared/stats/mixedModel'
-import { structureOf } from '#shared/stats/structure'
+import { eliminationOrder } from '#shared/stats/eliminationOrder'
+import { permute } from '#shared/stats/permute'
+import { meetingsOf, structureOf } from '#shared/stats/structure'
 import type { Structure } from '#shared/stats/structure'
 
 /** Everything a Laplace approximation works in: the model, its index lists, and the state at the last sds tried. */
 export interface Laplace {
+  /** the model, its effects renumbered in their order of elimination; those that are maximised stand last */
   model: MixedModel
+  /** number here of each effect of the model as it was given */
+  position: Int32Array
   structure: Structure
   /** effects and day effects: the mode once `findMode` has returned */
   x: Float64Array
@@ -28,12 +33,15 @@ export interface Laplace {
 }
 
 /** Makes the workspace of a model. @throws RangeError for a malformed model */
-export function makeLaplace(model: MixedModel): Laplace {
-  checkModel(model)
-  const structure = structureOf(model)
+export function makeLaplace(given: MixedModel): Laplace {
+  checkModel(given)
+  const { position, columns } = eliminationOrder(given.group.length, meetingsOf(given), Array.from(given.maximised, one => one === 1))
+  const model = permute(given, position)
+  const structure = structureOf(model, columns)
   const n = model.lo.length
   return {
     model,
+    position,
     structure,
     x: new Float64Array(model.group.length),
     w: new Float64Array(model.days),

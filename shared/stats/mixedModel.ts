@@ -27,11 +27,8 @@ export interface MixedModel {
   /** scales of the half-normal priors on the groups' sds and on sigma; Infinity means flat */
   sdScale: Float64Array
   sigmaScale: number
-  /**
-   * How many leading effects are integrated out. All of them for a Bayesian fit; for maximum likelihood the fixed effects stand
-   * last and are left out.
-   */
-  integrated: number
+  /** 1 for effects that are maximised over, not integrated out: the fixed effects of a maximum likelihood fit; else 0 */
+  maximised: Uint8Array
 }
 
 /** Standard deviations at which a model is evaluated: logs of the groups' sds, then ln sigma. */
@@ -63,6 +60,9 @@ export function checkModel(model: MixedModel): void {
     }
   }
   checkColumns(model)
+  if (model.priorSd.length !== model.group.length || model.maximised.length !== model.group.length) {
+    throw new RangeError(`priorSd and maximised must match ${model.group.length} effects, got ${model.priorSd.length}, ${model.maximised.length}`)
+  }
   if (model.sdScale.length !== model.groups) {
     throw new RangeError(`sdScale must have ${model.groups} entries, got ${model.sdScale.length}`)
   }

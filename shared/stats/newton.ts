@@ -1,6 +1,6 @@
 import { assemble } from '#shared/stats/assemble'
 import { objective } from '#shared/stats/objective'
-import { factorise, solve } from '#shared/stats/skyline'
+import { factorise, solve } from '#shared/stats/sparseCholesky'
 import type { Laplace } from '#shared/stats/laplace'
 
 const mostSteps = 100

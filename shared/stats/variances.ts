@@ -1,25 +1,24 @@
-import { inverseWithin } from '#shared/stats/skylineInverse'
-import type { Skyline } from '#shared/stats/skyline'
+import { inverseWithin } from '#shared/stats/sparseInverse'
 import type { Laplace } from '#shared/stats/laplace'
 
 /** Posterior variances at the sds last set: of each effect, each day effect, and each observation's eta. */
 export interface Variances { effects: Float64Array, days: Float64Array, etas: Float64Array }
 
-function quadratic(inverse: Skyline, cols: ArrayLike<number>, from: number, to: number, weights: Float64Array): number {
-  const { base, values } = inverse
+function quadratic(inverse: Float64Array, cols: ArrayLike<number>, from: number, to: number, weights: Float64Array): number {
+  const size = weights.length
   let sum = 0
   for (let s = from; s < to; s++) {
-    const row = base[cols[s]!]!
+    const row = cols[s]! * size
     const weight = weights[cols[s]!]!
     let inner = 0
-    for (let t = from; t < s; t++) inner += values[row + cols[t]!]! * weights[cols[t]!]!
-    sum += weight * (2 * inner + values[row + cols[s]!]! * weight)
+    for (let t = from; t < s; t++) inner += inverse[row + cols[t]!]! * weights[cols[t]!]!
+    sum += weight * (2 * inner + inverse[row + cols[s]!]! * weight)
   }
   return sum
 }
 
 /** eta of an observation without a day: its effects' own covariance. */
-function plainVariance(laplace: Laplace, inverse: Skyline, i: number, weights: Float64Array): number {
+function plainVariance(laplace: Laplace, inverse: Float64Array, i: number, weights: Float64Array): number {
   const { rowStart, cols, coefs } = laplace.model
   for (let t = rowStart[i]!; t < rowStart[i + 1]!; t++) weights[cols[t]!] = coefs[t]!
   const variance = quadratic(inverse, cols, rowStart[i]!, rowStart[i + 1]!, weights)
@@ -28,7 +27,7 @@ function plainVariance(laplace: Laplace, inverse: Skyline, i: number, weights: F
 }
 
 /** A day's effect, and the etas of its observations: the day's share of every effect met that day is taken off first. */
-function dayVariances(laplace: Laplace, inverse: Skyline, d: number, weights: Float64Array, out: Variances): void {
+function dayVariances(laplace: Laplace, inverse: Float64Array, d: number, weights: Float64Array, out: Variances): void {
   const { model, structure, cross, dayCurvature } = laplace
   const { dayClass, example, dayColStart, dayCols } = structure
   const from = dayColStart[d]!
@@ -48,9 +47,9 @@ function dayVariances(laplace: Laplace, inverse: Skyline, d: number, weights: Fl
 /** Posterior variances, the workspace standing at the mode. */
 export function posteriorVariances(laplace: Laplace): Variances {
   const { model, structure } = laplace
-  const inverse = inverseWithin(structure.matrix, structure.columnRows)
+  const inverse = inverseWithin(structure.matrix)
   const out = {
-    effects: laplace.x.map((_, k) => inverse.values[inverse.base[k]! + k]!),
+    effects: laplace.x.map((_, k) => inverse[k * laplace.x.length + k]!),
     days: new Float64Array(model.days),
     etas: new Float64Array(model.lo.length),
   }

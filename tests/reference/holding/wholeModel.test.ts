@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest'
 import { fitHolding } from '#shared/holding/fitHolding'
+import type { DesignEstimate, ModificationEstimate } from '#shared/types/holding'
 import { pullsOf, rms, tableOf } from './fixture'
 
 interface Row { name: string, mean: number, sd: number }
@@ -13,8 +14,8 @@ const mean = (values: readonly number[]): number => values.reduce((sum, value) =
 /** Source: full Bayes on the same pulls and priors by rstan; holding.stan, rstan.R and rstan.csv beside this file. */
 describe('the whole model against full Bayes', () => {
   const fit = fitHolding(pullsOf('wholeModelPulls.csv'))
-  const cells = new Map(fit.seabeds.flatMap(({ seabed, designs }) => designs.map(one => [`${one.design} ${seabed}`, one] as const)))
-  const ratios = new Map(fit.modifications.map(one => [`${one.design} ${one.modification} ${one.seabed}`, one]))
+  const cells = new Map<string, DesignEstimate>(fit.seabeds.flatMap(({ seabed, designs }) => designs.map(one => [`${one.design} ${seabed}`, one])))
+  const ratios = new Map<string, ModificationEstimate>(fit.modifications.map(one => [`${one.design} ${one.modification} ${one.seabed}`, one]))
   const sds: Record<string, number> = { ...fit.sds, sigma: fit.sigma }
 
   it('has the same cells, pulled or not', () => {

@@ -27,7 +27,7 @@ function example(width: number, open: number): MixedModel {
     groups: 2,
     sdScale: Float64Array.of(0.5, 0.5),
     sigmaScale: 1,
-    integrated: cols,
+    maximised: new Uint8Array(cols),
   }
 }
 
