@@ -6,7 +6,7 @@ import type { UnitSystem } from '#shared/units/systems'
 /** Display mode and unit habit. The cookie is written only when the reader chooses. */
 export const usePreferencesStore = defineStore('preferences', () => {
   const cookie = useCookie<string | null>('preference', {
-    maxAge: 365 * 24 * 3600, sameSite: 'lax', path: '/', decode: value => value, encode: value => value ?? '',
+    maxAge: 365 * 24 * 3600, sameSite: 'lax', path: '/',
   })
   const chosen = computed(() => readPreferences(cookie.value))
   const mode = computed(() => chosen.value.mode)

@@ -1,7 +1,7 @@
-import { scaleLog } from 'd3-scale'
 import type { HoldingWind, RankedRow, RankedSeabed, RankingAnswer } from '#shared/types/ranking'
 import type { Family } from '#shared/types/words'
 import type { Show } from '~/composables/useShow'
+import { logScale, roundValues } from '~/utils/scale'
 
 export const familyNames: Readonly<Record<Family, string>> = {
   'hinged-plough': 'hinged plough', 'fixed-plough': 'fixed plough', 'claw': 'claw', 'pivoting-fluke': 'pivoting fluke',
@@ -33,8 +33,6 @@ export const worstOf = (row: RankedRow): RankedSeabed | undefined =>
 /** One scale for every strip on the page, logarithmic, in per cent of the strip's width, with round ticks in the reader's unit. */
 export interface StripScale { at: (loadN: number) => number, ticks: { x: number, text: string }[] }
 
-const roundSteps = [1, 2, 5]
-
 /**
  * @param answer every row's strips and the load must fit
  * @param unitN newtons in one unit of the axis
@@ -45,12 +43,8 @@ export function stripScale(answer: RankingAnswer, unitN: number): StripScale {
   const loadN = answer.load.survey.totalN ?? 1000
   const low = Math.max(Math.min(loadN, ...strips.map(strip => strip.low90)) * 0.85, 20)
   const high = Math.max(loadN, ...strips.map(strip => strip.high90), low * 2) * 1.15
-  const place = scaleLog([low, high], [0, 100]).clamp(true)
-  const scale = (loadN: number): number => Math.round(place(loadN) * 100) / 100
-  const ticks = [-2, -1, 0, 1, 2, 3, 4, 5].flatMap(power => roundSteps.map(step => step * 10 ** power))
-    .filter(value => value * unitN > low * 1.05 && value * unitN < high / 1.05)
-    .map(value => ({ x: scale(value * unitN), text: String(Number(value.toPrecision(1))) }))
-  return { at: scale, ticks: ticks.length > 7 ? ticks.filter((_, index) => index % 2 === 0) : ticks }
+  const at = logScale(low, high)
+  return { at, ticks: roundValues(low * 1.05 / unitN, high / 1.05 / unitN).map(value => ({ x: at(value * unitN), text: String(value) })) }
 }
 
 /** A holding wind in short, for a table cell. */
