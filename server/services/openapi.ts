@@ -6,6 +6,8 @@ type Json = Record<string, unknown>
 
 const reasons: Readonly<Record<number, string>> = {
   400: 'Empty body, or not JSON',
+  404: 'There is no such thing',
+  404: 'There is nothing of that name',
   405: 'Method not allowed; see Allow',
   408: 'The body did not arrive in time',
   413: 'Too large: 64 kB, for fits 1.5 MB',
@@ -26,23 +28,29 @@ const nameOf = (id: string, kind: string) => `${id[0]?.toUpperCase()}${id.slice(
 const reference = (name: string) => ({ $ref: `#/components/schemas/${name}` })
 const json = (schema: Json) => ({ 'application/json': { schema } })
 
-function parameters(query: z.ZodMiniObject): Json[] {
-  const { properties = {}, required = [] } = schemaOf(query, 'input') as { properties?: Record<string, Json>, required?: string[] }
-  return Object.entries(properties).map(([name, { description, ...schema }]) => ({ name, in: 'query', required: required.includes(name), description, schema }))
+function parametersIn(place: 'path' | 'query', shape: z.ZodMiniObject | undefined): Json[] {
+  if (!shape) return []
+  const { properties = {}, required = [] } = schemaOf(shape, 'input') as { properties?: Record<string, Json>, required?: string[] }
+  return Object.entries(properties).map(([name, { description, ...schema }]) => ({ name, in: place, required: required.includes(name), description, schema }))
 }
 
-function responses({ id, answer, refusals }: Operation): Json {
+/** The names in braces of an address. */
+const places = (path: string): Json[] =>
+  [...path.matchAll(/\{(\w+)\}/g)].map(([, name]) => ({ name, in: 'path', required: true, schema: { type: 'string' } }))
+
+function responses({ id, answer, status = 200, refusals }: Operation): Json {
   const refused = [...refusals, 405, 500].map(status => [status, { description: reasons[status], content: json(reference('Problem')) }])
   const answered = answer ? json(reference(nameOf(id, 'Answer'))) : json({ type: 'object' })
-  return Object.fromEntries([[200, { description: 'The answer', content: answered }], ...refused])
+  return Object.fromEntries([[status, { description: 'The answer', content: answered }], ...refused])
 }
 
 function operationObject(operation: Operation): Json {
-  const { id, summary, request, query } = operation
+  const { id, summary, request, params, query } = operation
+  const parameters = [...parametersIn('path', params), ...parametersIn('query', query)]
   return {
     operationId: id,
     summary,
-    ...(query && { parameters: parameters(query) }),
+    ...(parameters.length > 0 && { parameters }),
     ...(request && { requestBody: { required: true, content: json(reference(nameOf(id, 'Request'))) } }),
     responses: responses(operation),
   }

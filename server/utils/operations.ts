@@ -16,15 +16,21 @@ import { rodeRequest } from '#shared/schemas/rode'
 
 /** A route of the API as it is described and allowed: one method, what it takes, what it answers. */
 export interface Operation {
+  /** as OpenAPI writes it: a part in braces stands for any one name */
+  /** a name in braces stands for one part of an address: /api/designs/{slug} */
   path: string
   method: 'GET' | 'POST'
   id: string
   summary: string
+  /** what stands in the braces of the path */
+  params?: z.ZodMiniObject
   /** the JSON body of a POST */
   request?: z.ZodMiniType
   /** the query of a GET */
   query?: z.ZodMiniObject
   answer?: z.ZodMiniType
+  /** 201 where the request makes something; 200 otherwise */
+  status?: 200 | 201
   /** refusals besides those of every route */
   refusals: readonly number[]
 }
@@ -48,10 +54,20 @@ export const operations: readonly Operation[] = [
 
 const readOnly = ['GET', 'HEAD', 'OPTIONS']
 
+/** What an operation's address looks like: a name in braces is any one part. */
+const patternOf = (path: string) => new RegExp(`^${path.replace(/[.]/g, '[.]').replace(/\{\w+\}/g, '[^/]+')}$`)
+const known = operations.map(({ path, method }) => ({ pattern: patternOf(path), method }))
+
+/** True where an address is one of a path's: part by part, a part in braces being any name. */
+function answersAt(path: string, address: string): boolean {
+  const [wanted, given] = [path.split('/'), address.split('/')]
+  return wanted.length === given.length && wanted.every((part, i) => part === given[i] || (part.startsWith('{') && given[i] !== ''))
+}
+
 /** The methods of an address: those of its operations; every page can be read; null where the API has nothing there. */
 export function allowedMethods(path: string): readonly string[] | null {
   if (!/^\/api(?:\/|$)/.test(path)) return readOnly
-  const own = operations.filter(operation => operation.path === path).map(({ method }) => method)
+  const own = operations.filter(operation => answersAt(operation.path, path)).map(({ method }) => method)
   if (own.length === 0) return null
   return own.includes('GET') ? [...readOnly, ...own.filter(method => method !== 'GET')] : [...own, 'OPTIONS']
 }

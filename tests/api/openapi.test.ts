@@ -27,8 +27,12 @@ describe('GET /api/openapi.json', () => {
   })
 
   it('describes every route there is, and none that is not', () => {
-    const files = readdirSync(fileURLToPath(new URL('../../server/api', import.meta.url)))
-    const routes = files.filter(name => !name.startsWith('[')).map(name => name.replace(/\.ts$/, '').split('.')).map(parts => `${parts.pop()} /api/${parts.join('.')}`)
+    const files = readdirSync(fileURLToPath(new URL('../../server/api', import.meta.url)), { recursive: true, encoding: 'utf8' })
+    const routes = files.filter(name => name.endsWith('.ts') && !name.startsWith('[...')).map((name) => {
+      const parts = name.replace(/\.ts$/, '').split('.')
+      const method = parts.pop()
+      return `${method} /api/${parts.join('.').replace(/\/index$/, '').replaceAll('[', '{').replaceAll(']', '}')}`
+    })
     const described = Object.entries(document.paths).flatMap(([path, methods]) => Object.keys(methods).map(method => `${method} ${path}`))
     expect(described.sort()).toEqual(routes.sort())
   })
