@@ -34,10 +34,6 @@ function parametersIn(place: 'path' | 'query', shape: z.ZodMiniObject | undefine
   return Object.entries(properties).map(([name, { description, ...schema }]) => ({ name, in: place, required: required.includes(name), description, schema }))
 }
 
-/** The names in braces of an address. */
-const places = (path: string): Json[] =>
-  [...path.matchAll(/\{(\w+)\}/g)].map(([, name]) => ({ name, in: 'path', required: true, schema: { type: 'string' } }))
-
 function responses({ id, answer, status = 200, refusals }: Operation): Json {
   const refused = [...refusals, 405, 500].map(status => [status, { description: reasons[status], content: json(reference('Problem')) }])
   const answered = answer ? json(reference(nameOf(id, 'Answer'))) : json({ type: 'object' })

@@ -54,10 +54,6 @@ export const operations: readonly Operation[] = [
 
 const readOnly = ['GET', 'HEAD', 'OPTIONS']
 
-/** What an operation's address looks like: a name in braces is any one part. */
-const patternOf = (path: string) => new RegExp(`^${path.replace(/[.]/g, '[.]').replace(/\{\w+\}/g, '[^/]+')}$`)
-const known = operations.map(({ path, method }) => ({ pattern: patternOf(path), method }))
-
 /** True where an address is one of a path's: part by part, a part in braces being any name. */
 function answersAt(path: string, address: string): boolean {
   const [wanted, given] = [path.split('/'), address.split('/')]
