@@ -32,6 +32,9 @@ async function writeCatalogue(tx: Transaction, world: World) {
   return { designId, sizeId }
 }
 
+/** Invented trials are published on the evening of their day. */
+const eveningOf = ({ day }: { day: string }) => `${day}T18:00:00Z`
+
 async function writeTrials(tx: Transaction, world: World) {
   const rigId = idsBySlug(await tx.insert(rigs).values(world.rigs.map(rig => ({
     slug: rig.slug, name: rig.name, vessel: rig.vessel, limitN: rig.limitN, stepsN: rig.thrustStepsN,
@@ -42,7 +45,7 @@ async function writeTrials(tx: Transaction, world: World) {
     latitudeDeg: trial.latitudeDeg, longitudeDeg: trial.longitudeDeg, depthM: trial.depthM, windMs: trial.windMs, windFrom: trial.windFrom,
     currentMs: trial.currentMs, waveHeightM: trial.waveHeightM, seaState: trial.seaState, procedure: trial.procedure, note: trial.note,
     rode: { chainLengthM: trial.chainLengthM, chainDiameterMm: trial.chainMm, bowHeightM: trial.bowHeightM },
-    publishedAt: `${trial.day}T18:00:00Z`, invented: true,
+    publishedAt: eveningOf(trial), invented: true,
   }))).returning({ id: trials.id, slug: trials.slug }))
 }
 
@@ -53,12 +56,12 @@ export async function writeWorld(tx: Transaction, world: World): Promise<void> {
     .values(world.modifications.map(({ slug, name, description }) => ({ slug, name, description })))
     .returning({ id: modifications.id, slug: modifications.slug }))
   const trialId = await writeTrials(tx, world)
-  const angles = new Map(world.trials.map(trial => [trial.slug, trial.shankAngleDeg]))
+  const ofTheDay = new Map(world.trials.map(trial => [trial.slug, { shankAngleDeg: trial.shankAngleDeg, recordedAt: eveningOf(trial) }]))
   const rows = world.pulls.map(pull => ({
-    trialId: trialId(pull.trial), ordinal: pull.order, designId: designId(pull.design), sizeId: sizeId(pull.design, pull.massKg),
+    ...ofTheDay.get(pull.trial), trialId: trialId(pull.trial), ordinal: pull.order, designId: designId(pull.design), sizeId: sizeId(pull.design, pull.massKg),
     modificationId: pull.modification === null ? null : modificationId(pull.modification),
     anchorSetting: pull.anchorSetting, pair: pull.pair, seabed: pull.seabed, setting: pull.setting, firstTry: pull.firstTry, fresh: pull.fresh,
-    heldN: pull.heldN, movedN: pull.movedN, shankAngleDeg: angles.get(pull.trial), end: pull.end, creepMMin: pull.creepRateMPerMin,
+    heldN: pull.heldN, movedN: pull.movedN, end: pull.end, creepMMin: pull.creepRateMPerMin,
     after: pull.after, veerDeg: pull.veerDeg, veer: pull.veerOutcome, attitude: pull.attitude, fouling: pull.fouling, condition: pull.condition,
     eastM: pull.eastM, northM: pull.northM, note: pull.note ?? '',
   }))

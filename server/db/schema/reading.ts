@@ -1,10 +1,14 @@
 import { sql } from 'drizzle-orm'
-import { check, index, integer, pgTable, serial, text, unique } from 'drizzle-orm/pg-core'
+import { check, index, integer, jsonb, pgTable, serial, text, unique } from 'drizzle-orm/pg-core'
+import type { DescribedRows, ReleaseFile } from '../../../shared/types/release'
 import { moment, oneOf } from './columns'
 import { fits } from './fits'
 import { pulls, trials } from './trials'
 
-/** A frozen, numbered edition of the data: the pulls published by `cutAt` and the fit of exactly those. */
+/**
+ * A frozen, numbered edition of the data: the pulls published by `cutAt`, the corrections known by then, and the fit of exactly those.
+ * Pulls are never changed, so their numbers freeze them; what describes them (designs, rigs, trials) may be edited later, so it is kept as it was.
+ */
 export const releases = pgTable('releases', {
   id: serial().primaryKey(),
   version: text().notNull(),
@@ -14,9 +18,14 @@ export const releases = pgTable('releases', {
   /** SHA-256 over the release's files, so that a rebuilt one can be told from a changed one */
   hash: text().notNull(),
   notes: text().notNull().default(''),
+  /** every pull of the release by its number, superseded ones too */
+  pullIds: integer('pull_ids').array().notNull(),
+  described: jsonb().$type<DescribedRows>().notNull(),
+  files: jsonb().$type<ReleaseFile[]>().notNull(),
 }, table => [
   unique('releases_version').on(table.version),
   check('releases_version_form', sql`${table.version} ~ '^[0-9]+([.][0-9]+)*$'`),
+  check('releases_have_pulls', sql`cardinality(${table.pullIds}) > 0`),
   check('releases_hash_form', sql`${table.hash} ~ '^[0-9a-f]{64}$'`),
 ])
 

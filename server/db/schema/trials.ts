@@ -96,6 +96,8 @@ export const pulls = pgTable('pulls', {
   condition: text().notNull().default('undamaged'),
   note: text().notNull().default(''),
   supersededById: integer('superseded_by_id').references((): AnyPgColumn => pulls.id),
+  /** when the row was written down: a correction is known from then on; before its trial is published nobody sees it */
+  recordedAt: moment('recorded_at').notNull().defaultNow(),
 }, table => [
   unique('pulls_trial_ordinal').on(table.trialId, table.ordinal),
   index('pulls_design_seabed').on(table.designId, table.seabed),
