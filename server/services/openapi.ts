@@ -7,7 +7,6 @@ type Json = Record<string, unknown>
 const reasons: Readonly<Record<number, string>> = {
   400: 'Empty body, or not JSON',
   404: 'There is no such thing',
-  404: 'There is nothing of that name',
   405: 'Method not allowed; see Allow',
   408: 'The body did not arrive in time',
   413: 'Too large: 64 kB, for fits 1.5 MB',
