@@ -1,3 +1,5 @@
+import { dotRange } from '#shared/stats/dotRange'
+
 /**
  * A symmetric positive definite matrix of which only some places below the diagonal can hold anything, and its Cholesky factor,
  * which fills no others. Kept row by row in full, so that any place is found at once; only the listed ones are worked on.
@@ -6,6 +8,8 @@ export interface SparseMatrix {
   size: number
   /** for each column the rows below the diagonal that elimination can fill, rising */
   columns: readonly Int32Array[]
+  /** from this column on every place below the diagonal can be filled */
+  fullFrom: number
   /** entry (i, j), i >= j, is values[i * size + j] */
   values: Float64Array
 }
@@ -16,7 +20,38 @@ export function makeSparse(columns: readonly Int32Array[]): SparseMatrix {
   columns.forEach((rows, j) => rows.forEach((row) => {
     if (!(row > j && row < size)) throw new RangeError(`rows of column ${j} must be between ${j + 1} and ${size - 1}, got ${row}`)
   }))
-  return { size, columns, values: new Float64Array(size * size) }
+  let fullFrom = size
+  while (fullFrom > 0 && columns[fullFrom - 1]!.length === size - fullFrom) fullFrom--
+  return { size, columns, fullFrom, values: new Float64Array(size * size) }
+}
+
+/** Takes one eliminated column off everything it joins. */
+function eliminate(matrix: SparseMatrix, j: number, column: Float64Array): void {
+  const { size, columns, values } = matrix
+  const rows = columns[j]!
+  for (let a = 0; a < rows.length; a++) {
+    const base = rows[a]! * size
+    const value = values[base + j]! / values[j * size + j]!
+    values[base + j] = value
+    column[a] = value
+    if (value === 0) continue
+    for (let b = 0; b <= a; b++) values[base + rows[b]!]! -= value * column[b]!
+  }
+}
+
+/** Factors what is left from a column on where every place holds something, row by row. */
+function factoriseFull(matrix: SparseMatrix, from: number): boolean {
+  const { size, values } = matrix
+  for (let i = from; i < size; i++) {
+    const row = i * size
+    for (let j = from; j < i; j++) {
+      values[row + j] = (values[row + j]! - dotRange(values, row + from, values, j * size + from, j - from)) / values[j * size + j]!
+    }
+    const diagonal = values[row + i]! - dotRange(values, row + from, values, row + from, i - from)
+    if (!(diagonal > 0)) return false
+    values[row + i] = Math.sqrt(diagonal)
+  }
+  return true
 }
 
 /**
@@ -25,22 +60,15 @@ export function makeSparse(columns: readonly Int32Array[]): SparseMatrix {
  * @returns false when the matrix is not positive definite (the values are then spoilt)
  */
 export function factorise(matrix: SparseMatrix): boolean {
-  const { size, columns, values } = matrix
-  for (let j = 0; j < size; j++) {
+  const { size, fullFrom, values } = matrix
+  const column = new Float64Array(size)
+  for (let j = 0; j < fullFrom; j++) {
     const diagonal = values[j * size + j]!
     if (!(diagonal > 0)) return false
-    const root = Math.sqrt(diagonal)
-    values[j * size + j] = root
-    const rows = columns[j]!
-    for (let a = 0; a < rows.length; a++) {
-      const base = rows[a]! * size
-      const value = values[base + j]! / root
-      values[base + j] = value
-      if (value === 0) continue
-      for (let b = 0; b <= a; b++) values[base + rows[b]!]! -= value * values[rows[b]! * size + j]!
-    }
+    values[j * size + j] = Math.sqrt(diagonal)
+    eliminate(matrix, j, column)
   }
-  return true
+  return factoriseFull(matrix, fullFrom)
 }
 
 /** Sum of the logarithms of the first `count` diagonal entries of a factor: half the log determinant of that leading block. */

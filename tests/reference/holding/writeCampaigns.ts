@@ -21,8 +21,8 @@ write('exactPulls.csv', writePulls(simulateCampaign({
 
 /** The whole model: two rigs, modifications, angles, steps, limits. */
 write('wholeModelPulls.csv', writePulls(simulateCampaign({
-  seed: 23, designs: 10, families: 5, seabeds: ['firm-mud', 'loose-sand', 'sandy-mud', 'soft-mud'], trialsPerSeabed: 7,
-  designsPerTrial: 5, pullsPerDay: 4, modifiedShare: 0.3, rigs: 2, anglesDeg: [0, 0, 5], limitN: 4500, massesKg: [10, 20, 35],
+  seed: 23, designs: 14, families: 7, seabeds: ['firm-mud', 'loose-sand', 'sandy-mud', 'soft-mud', 'gravel'], trialsPerSeabed: 5,
+  designsPerTrial: 4, pullsPerDay: 5, modifiedShare: 0.3, rigs: 2, anglesDeg: [0, 0, 5], limitN: 4500, massesKg: [10, 20, 35],
 }).pulls.map(round)))
 
 /** Loads to whole newtons, as they would be recorded. */
