@@ -19,7 +19,12 @@ export function designIndex(fit: SeabedFit, design: string): number {
   return fit.designs.findIndex(estimate => estimate.design === design)
 }
 
-function element(fit: SeabedFit, row: number, column: number): number {
+/**
+ * One number of a seabed's joint covariance: designs by their place, beta_s last.
+ *
+ * @throws RangeError where the matrix does not hold it
+ */
+export function element(fit: SeabedFit, row: number, column: number): number {
   const value = fit.covariance[row * (fit.designs.length + 1) + column]
   if (value === undefined) {
     throw new RangeError(`covariance of ${fit.seabed} must hold ${(fit.designs.length + 1) ** 2} numbers, got ${fit.covariance.length}`)
