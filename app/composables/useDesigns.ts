@@ -4,8 +4,7 @@ export interface DesignName { slug: string, name: string }
 export function useDesigns() {
   return useAsyncData('designs', async (): Promise<DesignName[]> => {
     try {
-      const { designs } = await $fetch<{ designs: DesignName[] }>('/api/designs')
-      return designs.map(({ slug, name }) => ({ slug, name }))
+      return (await $fetch<{ designs: DesignName[] }>('/api/design-names')).designs
     }
     catch {
       return []

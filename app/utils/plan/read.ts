@@ -140,7 +140,7 @@ export function readPlan(plan: TypedPlan, system: UnitSystem): PlanReading {
     request: {
       boat: kept,
       wind: {
-        speedMs: windMs, kind: plan.choices.blow as WindKind, exposure: plan.choices.exposure as Exposure,
+        speedMs: windMs, kind: beaufortTyped(readings.wind) ? 'mean' : plan.choices.blow as WindKind, exposure: plan.choices.exposure as Exposure,
         ...given('at10m', plan.choices.forecast === 'yes' || beaufortTyped(readings.wind) ? true : undefined),
         ...given('sheerDeg', sheer === undefined ? undefined : sheer / DEG_RAD),
       },
