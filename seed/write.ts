@@ -53,7 +53,8 @@ async function writeTrials(tx: Transaction, world: World) {
 export async function writeWorld(tx: Transaction, world: World): Promise<void> {
   const { designId, sizeId } = await writeCatalogue(tx, world)
   const modificationId = idsBySlug(await tx.insert(modifications)
-    .values(world.modifications.map(({ slug, name, description }) => ({ slug, name, description })))
+    .values(world.modifications.map(({ slug, name, description, addedMassKg, priceMinor, currency, priceDate }) =>
+      ({ slug, name, description, addedMassKg, priceMinor, priceCurrency: currency, priceOn: priceDate })))
     .returning({ id: modifications.id, slug: modifications.slug }))
   const trialId = await writeTrials(tx, world)
   const ofTheDay = new Map(world.trials.map(trial => [trial.slug, { shankAngleDeg: trial.shankAngleDeg, recordedAt: eveningOf(trial) }]))

@@ -35,7 +35,18 @@ export interface WorldSize {
   priceDate: string
 }
 
-export interface WorldModification { slug: string, design: string, name: string, description: string }
+/** A change to one design; what it adds to an anchor of 20 kg (negative: takes off), and what a yard asks for it, in minor units. */
+export interface WorldModification {
+  slug: string
+  design: string
+  name: string
+  description: string
+  addedMassKg: number
+  priceMinor: number
+  currency: string
+  /** YYYY-MM-DD */
+  priceDate: string
+}
 
 export interface WorldRig {
   slug: string
