@@ -103,6 +103,7 @@ export const pulls = pgTable('pulls', {
   index('pulls_design_seabed').on(table.designId, table.seabed),
   index('pulls_seabed').on(table.seabed),
   index('pulls_modification').on(table.modificationId).where(sql`modification_id is not null`),
+  index('pulls_pair').on(table.trialId, table.pair).where(sql`pair is not null`),
   oneOf('pulls_seabed_numbered', table.seabed, numberedSeabeds),
   oneOf('pulls_setting_known', table.setting, settingOutcomes),
   oneOf('pulls_end_known', table.end, pullEnds),

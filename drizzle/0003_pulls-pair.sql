@@ -1,0 +1,1 @@
+CREATE INDEX "pulls_pair" ON "pulls" USING btree ("trial_id","pair") WHERE pair is not null;
