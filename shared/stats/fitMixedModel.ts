@@ -37,7 +37,7 @@ const greatestSd = 10
  * where they cost little and the sds are least known.
  */
 function usualPoints(observations: number): number {
-  return Math.min(256, Math.max(96, Math.round(32_768 / observations)))
+  return Math.min(256, Math.max(64, Math.round(65_536 / observations)))
 }
 
 /** Points that weigh less than this (the mode weighs about 1) are left out. */
