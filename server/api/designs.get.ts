@@ -1,8 +1,8 @@
 import { visitor } from '#shared/access/mayRead'
-import { designsQuery } from '#shared/schemas/catalogue'
-import { designs } from '../services/catalogue'
+import { designsQuery } from '#shared/schemas/reading'
+import { designPage } from '../services/designPages'
 import { apiHandler } from '../utils/handler'
 import { queryOf, validate } from '../utils/validate'
 
-/** Every design with its sizes. */
-export default apiHandler(event => designs(visitor, validate(designsQuery, queryOf(event.path))))
+/** A page of the designs. */
+export default apiHandler(event => designPage(visitor, validate(designsQuery, queryOf(event.path))))

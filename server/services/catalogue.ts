@@ -1,19 +1,11 @@
 import { mayRead, type Actor } from '#shared/access/mayRead'
 import { seabedFacts } from '#shared/seabed/seabeds'
-import type { DesignListing, DesignsAnswer, EstimateListing, EstimatesAnswer, SeabedsAnswer } from '#shared/types/catalogue'
+import type { EstimateListing, EstimatesAnswer, SeabedsAnswer } from '#shared/types/catalogue'
 import type { DesignEstimate, SeabedFit } from '#shared/types/holding'
-import type { Family, NumberedSeabed } from '#shared/types/words'
-import { listDesigns, listSeabeds } from '../db/queries/catalogue'
+import type { NumberedSeabed } from '#shared/types/words'
+import { listSeabeds } from '../db/queries/catalogue'
 import { database } from './application'
 import { standingEvidence } from './standing'
-
-/** The designs with their sizes, by name. */
-export async function designs(actor: Actor, query: { family?: Family }): Promise<DesignsAnswer> {
-  const all: DesignListing[] = await listDesigns(database())
-  return {
-    designs: all.filter(({ family }) => (query.family ?? family) === family && mayRead(actor, { what: 'design', family }).allowed),
-  }
-}
 
 /** The seabeds with what they are. */
 export async function seabeds(actor: Actor): Promise<SeabedsAnswer> {

@@ -58,3 +58,13 @@ export function countRequest(event: H3Event): void {
   limiter ??= createLimiter(readLimits(process.env))
   limiter(event)
 }
+
+/** Questions about pulls: one address may ask five at once, and one more every two minutes. */
+const questions = { perMinute: 0.5, burst: 5 }
+let questionLimiter: ((event: H3Event) => void) | null = null
+
+/** Takes one question from what the client's address may ask. @throws ApiError 429 with Retry-After */
+export function countQuestion(event: H3Event): void {
+  questionLimiter ??= createLimiter({ ...questions, trustedProxies: readLimits(process.env).trustedProxies })
+  questionLimiter(event)
+}

@@ -18,6 +18,15 @@ export type Readable =
   | { what: 'seabed', seabed: Seabed }
   /** figures of holding on a seabed */
   | { what: 'estimate', seabed: Seabed }
+  /** single pulls on a seabed, as ticks or in a trial's table */
+  | { what: 'pulls', seabed: Seabed }
+  /** a trial as its tester describes it */
+  | { what: 'trial', slug: string }
+  /** an edition of the data; `open` once its data are twelve months old */
+  | { what: 'release', version: string, open: boolean }
+  /** anchors compared on a seabed, and what a modification does there */
+  | { what: 'comparison', seabed: Seabed }
+  | { what: 'modification', seabed: Seabed }
 
 export type Ability = { allowed: true } | { allowed: false, reason: string }
 

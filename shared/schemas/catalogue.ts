@@ -1,9 +1,6 @@
 import * as z from 'zod/mini'
-import { families, numberedSeabeds } from '#shared/types/words'
+import { numberedSeabeds } from '#shared/types/words'
 import { fieldsOf, oneOf, slug } from './fields'
-
-/** GET /api/designs */
-export const designsQuery = fieldsOf({ family: z.optional(oneOf(families, 'Only designs of this family')) }, 'Which designs')
 
 /** GET /api/seabeds */
 export const seabedsQuery = fieldsOf({}, 'All seabeds')

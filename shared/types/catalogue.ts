@@ -44,7 +44,6 @@ export interface EstimateListing extends DesignEstimate {
   holding15KgN: { median: number, low90: number, high90: number }
 }
 
-export interface DesignsAnswer { designs: DesignListing[] }
 export interface SeabedsAnswer { seabeds: SeabedListing[] }
 export interface EstimatesAnswer {
   fit: { id: number, modelVersion: string, at: string, dataHash: string }

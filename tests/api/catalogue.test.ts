@@ -1,9 +1,11 @@
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import { seabeds as seabedSlugs } from '#shared/types/words'
-import { designsAnswer, estimatesAnswer, seabedsAnswer } from '#shared/schemas/answers/catalogue'
+import { estimatesAnswer, seabedsAnswer } from '#shared/schemas/answers/catalogue'
 import { notationAnswer } from '#shared/schemas/answers/notation'
-import type { DesignsAnswer, EstimatesAnswer, SeabedsAnswer } from '#shared/types/catalogue'
+import { designsAnswer } from '#shared/schemas/answers/reading'
+import type { EstimatesAnswer, SeabedsAnswer } from '#shared/types/catalogue'
 import type { ChartNotationAnswer } from '#shared/types/chart'
+import type { DesignsPage } from '#shared/types/reading'
 import { expectProblem, get, unlimited } from './client'
 import { startApp, type TestApp } from './harness'
 
@@ -21,7 +23,7 @@ const read = async <T>(path: string) => {
 
 describe('GET /api/designs', () => {
   it('lists every design with its sizes, lightest first, as the description says', async () => {
-    const answer = await read<DesignsAnswer>('/api/designs')
+    const answer = await read<DesignsPage>('/api/designs')
     expect(designsAnswer.safeParse(answer).error).toBeUndefined()
     expect(answer.designs.length).toBeGreaterThanOrEqual(16)
     for (const { sizes, invented } of answer.designs) {
@@ -33,9 +35,9 @@ describe('GET /api/designs', () => {
   })
 
   it('may be narrowed to a family', async () => {
-    const { designs } = await read<DesignsAnswer>('/api/designs')
+    const { designs } = await read<DesignsPage>('/api/designs')
     const family = designs[0]?.family
-    const narrowed = await read<DesignsAnswer>(`/api/designs?family=${family}`)
+    const narrowed = await read<DesignsPage>(`/api/designs?family=${family}`)
     expect(narrowed.designs).toEqual(designs.filter(design => design.family === family))
   })
 })

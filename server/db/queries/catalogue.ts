@@ -30,7 +30,7 @@ export interface ListedDesign {
 
 export interface ListedSeabed { slug: Seabed, name: string, soil: SoilKind, numbered: boolean }
 
-function listedSize(size: typeof sizes.$inferSelect): ListedSize {
+export function listedSize(size: typeof sizes.$inferSelect): ListedSize {
   const { id: _id, designId: _designId, priceMinor, priceCurrency, priceOn, ...facts } = size
   const price = priceMinor === null || priceCurrency === null || priceOn === null
     ? null

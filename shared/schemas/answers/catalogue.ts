@@ -6,7 +6,7 @@ import { fitName } from './ranking'
 
 const stated = <T extends z.core.SomeType>(fact: T) => z.nullable(fact)
 
-const size = fieldsOf({
+export const size = fieldsOf({
   massKg: figure('kg', 'Mass'),
   shankLengthMm: stated(figure('mm', 'Shank length')),
   flukeWidthMm: stated(figure('mm', 'Fluke width')),
@@ -19,30 +19,28 @@ const size = fieldsOf({
   price: stated(fieldsOf({ minor: count('In minor units'), currency: words('ISO 4217'), on: words('Date of the price') }, 'Price')),
 }, 'A mass of the design; null: not stated')
 
-export const designsAnswer = fieldsOf({
-  designs: list(fieldsOf({
-    slug: words('Slug'),
-    name: words('Name'),
-    family: z.enum(families),
-    familyName: words('Family in words'),
-    description: words('Description'),
-    settings: list(z.string(), 'Fluke angles or the like that its maker provides'),
-    invented: flag('A design of the demo world'),
-    sizes: list(size, 'Sizes, lightest first'),
-  }, 'An anchor design'), 'Designs by name'),
-}, 'The designs')
+export const designListing = fieldsOf({
+  slug: words('Slug'),
+  name: words('Name'),
+  family: z.enum(families),
+  familyName: words('Family in words'),
+  description: words('Description'),
+  settings: list(z.string(), 'Fluke angles or the like that its maker provides'),
+  invented: flag('A design of the demo world'),
+  sizes: list(size, 'Sizes, lightest first'),
+}, 'An anchor design')
 
-export const seabedsAnswer = fieldsOf({
-  seabeds: list(fieldsOf({
-    slug: z.enum(seabeds),
-    name: words('Name'),
-    soil: z.enum(soilKinds),
-    numbered: flag('Can carry a holding figure'),
-    description: words('Description'),
-    notation: words('As a chart would print it'),
-    cautions: list(z.string(), 'Cautions'),
-  }, 'A seabed'), 'Seabeds'),
-}, 'The seabeds')
+export const seabedListing = fieldsOf({
+  slug: z.enum(seabeds),
+  name: words('Name'),
+  soil: z.enum(soilKinds),
+  numbered: flag('Can carry a holding figure'),
+  description: words('Description'),
+  notation: words('As a chart would print it'),
+  cautions: list(z.string(), 'Cautions'),
+}, 'A seabed')
+
+export const seabedsAnswer = fieldsOf({ seabeds: list(seabedListing, 'Seabeds') }, 'The seabeds')
 
 export const estimatesAnswer = fieldsOf({
   fit: z.extend(fitName, { dataHash: words('Hash of the pulls') }),
