@@ -7,7 +7,7 @@ import { rodeAnswer } from './rode'
 
 const seabed = z.enum(seabeds)
 
-const holdingWind = z.union([
+export const holdingWind = z.union([
   fieldsOf({ meanMs: figure('m/s', 'Mean'), gustMs: figure('m/s', 'Gust'), atLeast: flag('Capped at the most any pull here showed') }, 'The wind at which the chance falls to 0.9'),
   fieldsOf({ reason: z.enum(['doesNotReach', 'beyond64kn']) }, 'No wind can be given'),
 ])
