@@ -15,18 +15,24 @@ export interface UnseenEffect { id: number, group: number, knownSd: number }
 /** Posterior mean and covariance (row-major) of a list of contrasts. */
 export interface Moments { mean: Float64Array, covariance: Float64Array }
 
-/** L^-1 z of each contrast z, kept only at the places where any of them holds something. */
+/** L^-1 z of one contrast z. */
+function half(laplace: Laplace, contrast: Contrast): Float64Array {
+  const y = new Float64Array(laplace.x.length)
+  for (const col of contrast.cols) y[laplace.position[col]!]! += 1
+  solveForward(laplace.structure.matrix, y)
+  return y
+}
+
+/** The same of each contrast, kept only at the places where any of them holds something. */
 function halves(laplace: Laplace, contrasts: readonly Contrast[]): Float64Array[] {
-  const used = new Uint8Array(laplace.x.length)
-  const full = contrasts.map((contrast) => {
-    const y = new Float64Array(laplace.x.length)
-    for (const col of contrast.cols) y[laplace.position[col]!]! += 1
-    solveForward(laplace.structure.matrix, y)
-    for (let k = 0; k < y.length; k++) if (y[k] !== 0) used[k] = 1
-    return y
+  const full = contrasts.map(contrast => half(laplace, contrast))
+  const places: number[] = []
+  for (let k = 0; k < laplace.x.length; k++) if (full.some(y => y[k] !== 0)) places.push(k)
+  return full.map((y) => {
+    const kept = new Float64Array(places.length)
+    for (let p = 0; p < kept.length; p++) kept[p] = y[places[p]!]!
+    return kept
   })
-  const places = Int32Array.from(laplace.x.keys()).filter(k => used[k] === 1)
-  return full.map(y => Float64Array.from(places, k => y[k]!))
 }
 
 function dot(a: Float64Array, b: Float64Array): number {
@@ -53,12 +59,12 @@ export function contrastList(contrasts: readonly Contrast[]): ContrastList {
  */
 export function contrastMoments(laplace: Laplace, list: ContrastList, centre: Float64Array, groupSds: Float64Array): Moments {
   const size = list.contrasts.length
-  const half = halves(laplace, list.contrasts)
+  const parts = halves(laplace, list.contrasts)
   const mean = Float64Array.from(list.contrasts, contrast => contrast.cols.reduce((sum, col) => sum + centre[laplace.position[col]!]!, 0))
   const covariance = new Float64Array(size * size)
   for (let i = 0; i < size; i++) {
     for (let j = 0; j <= i; j++) {
-      const both = dot(half[i]!, half[j]!)
+      const both = dot(parts[i]!, parts[j]!)
       covariance[i * size + j] = both
       covariance[j * size + i] = both
     }

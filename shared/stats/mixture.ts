@@ -16,7 +16,8 @@ export function addMoments(sums: MomentSums, moments: Moments, weight: number): 
   sums.weight += weight
   for (let i = 0; i < size; i++) {
     sums.mean[i]! += weight * away[i]!
-    for (let j = 0; j < size; j++) sums.second[i * size + j]! += weight * (moments.covariance[i * size + j]! + away[i]! * away[j]!)
+    const row = i * size
+    for (let j = 0; j < size; j++) sums.second[row + j]! += weight * (moments.covariance[row + j]! + away[i]! * away[j]!)
   }
 }
 

@@ -36,7 +36,9 @@ export function solveWithDays(laplace: Laplace, gx: Float64Array, gw: Float64Arr
 }
 
 function moved(from: Float64Array, step: Float64Array, length: number): Float64Array {
-  return from.map((value, k) => value + length * step[k]!)
+  const to = new Float64Array(from.length)
+  for (let k = 0; k < to.length; k++) to[k] = from[k]! + length * step[k]!
+  return to
 }
 
 /**
