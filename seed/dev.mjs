@@ -3,21 +3,17 @@ import { join } from 'node:path'
 import { ensureNodeModules } from './host/packages.mjs'
 import { demoEnvironment, holdLock, root, stamps } from './host/project.mjs'
 import { openDatabase, serve } from './host/serve.mjs'
-import { portOrExit, say } from './host/shell.mjs'
+import { freePortNamed, say } from './host/shell.mjs'
+import { runAndStop } from './host/stops.mjs'
 
-const port = await portOrExit(process.env.PORT ?? '3000')
-try {
-  const release = holdLock('demo')
-  process.on('exit', release)
+await runAndStop(async () => {
+  const port = await freePortNamed(process.env.PORT ?? '3000')
+  holdLock('demo')
   await ensureNodeModules(root, stamps)
-  const database = await openDatabase()
-  const env = { ...demoEnvironment({ port, url: database.url }), NODE_ENV: 'development' }
-  process.exitCode = await serve({
-    command: join(root, 'node_modules/.bin/nuxt'), args: ['dev', '--host', '127.0.0.1', '--port', String(port)], env, database,
+  const url = await openDatabase()
+  return serve({
+    command: join(root, 'node_modules/.bin/nuxt'), args: ['dev', '--host', '127.0.0.1', '--port', String(port)],
+    env: { ...demoEnvironment({ port, url }), NODE_ENV: 'development' },
     banner: () => say(`\nDeveloping at http://localhost:${port}\n`),
   })
-}
-catch (error) {
-  console.error(error.message)
-  process.exitCode = 1
-}
+})

@@ -5,6 +5,7 @@ import { sweepClusters } from '../seed/host/cluster.mjs'
 import { ensureChromium, ensureNodeModules, ensurePostgres } from '../seed/host/packages.mjs'
 import { dataFolder, ensureBuild, root, stamps } from '../seed/host/project.mjs'
 import { run, say } from '../seed/host/shell.mjs'
+import { isStopping, onStop, runAndStop } from '../seed/host/stops.mjs'
 
 const bin = name => join(root, 'node_modules', '.bin', name)
 const long = process.argv.includes('--long')
@@ -62,16 +63,18 @@ async function everything() {
   await tests('api', 'browser')
 }
 
-try {
-  await everything()
-}
-catch (error) {
-  console.error(error.message)
-  count('set-up', 0, 1)
-}
-finally {
-  await sweepClusters(dataFolder, 'tests-')
-}
-if (tally.wrong.length) say(`\nFailed: ${tally.wrong.join('; ')}`)
+await runAndStop(async () => {
+  // Registered first, so done last: whatever a killed test run has left.
+  onStop(() => sweepClusters(dataFolder, 'tests-'))
+  try {
+    await everything()
+  }
+  catch (error) {
+    if (isStopping()) return 1
+    console.error(error.message)
+    count('set-up', 0, 1)
+  }
+  if (tally.wrong.length) say(`\nFailed: ${tally.wrong.join('; ')}`)
+  return tally.failed ? 1 : 0
+})
 say(`\n${tally.passed} passed, ${tally.failed} failed${tally.skipped ? `, ${tally.skipped} skipped` : ''}`)
-process.exitCode = tally.failed ? 1 : 0

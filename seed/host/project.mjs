@@ -4,11 +4,15 @@ import { existsSync, mkdirSync, readFileSync, rmSync, writeFileSync } from 'node
 import { join } from 'node:path'
 import { fileURLToPath } from 'node:url'
 import { alive, run, say } from './shell.mjs'
+import { onStop } from './stops.mjs'
 import { buildSources, openStamps, seedSources, sourceHash } from './stamps.mjs'
 
 export const root = fileURLToPath(new URL('../..', import.meta.url)).replace(/\/$/, '')
-export const dataFolder = join(root, '.data')
-export const stamps = openStamps(join(dataFolder, 'stamps.json'))
+/** Where the clone's own cluster, secrets and locks lie; KEDGEWISE_DATA names another folder. */
+export const dataFolder = process.env.KEDGEWISE_DATA ?? join(root, '.data')
+/** What node_modules and .output were made from: they belong to the clone, whatever data it runs on. */
+export const stamps = openStamps(join(root, '.data', 'stamps.json'))
+const dataStamps = openStamps(join(dataFolder, 'data.json'))
 export const builtServer = join(root, '.output', 'server', 'index.mjs')
 
 const bin = name => join(root, 'node_modules', '.bin', name)
@@ -21,16 +25,16 @@ export function secret(name) {
   return readFileSync(file, 'utf8')
 }
 
-/** Lets one demo (or dev server) at a time use this clone's data; hands back the way to let go. */
+/** Lets one demo (or dev server) at a time use this clone's data, until this process ends. */
 export function holdLock(name) {
   mkdirSync(dataFolder, { recursive: true })
   const file = join(dataFolder, `${name}.pid`)
   const other = existsSync(file) ? Number(readFileSync(file, 'utf8')) : 0
   if (other && other !== process.pid && alive(other)) {
-    throw new Error(`another ${name} of this clone is running as process ${other}: stop it first`)
+    throw new Error(`another ${name} of this clone is running as process ${other}: stop it first (if that is something else, delete ${file})`)
   }
   writeFileSync(file, String(process.pid))
-  return () => rmSync(file, { force: true })
+  onStop(() => rmSync(file, { force: true }))
 }
 
 /** Builds the application unless it was built from these very sources. */
@@ -46,10 +50,10 @@ export async function ensureBuild() {
 /** Seeds the database unless this cluster holds this very world. */
 export async function ensureSeed(url, { known }) {
   const hash = sourceHash(root, seedSources)
-  if (known && stamps.get('seed') === hash) return
+  if (known && dataStamps.get('seed') === hash) return
   say('Writing the demo world')
   await run(bin('tsx'), [join(root, 'seed', 'seed.ts')], { cwd: root, env: { ...process.env, DATABASE_URL: url } })
-  if (known !== undefined) stamps.set('seed', hash)
+  if (known !== undefined) dataStamps.set('seed', hash)
 }
 
 /** What a demo server finds in its environment. */

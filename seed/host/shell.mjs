@@ -2,19 +2,36 @@
 import { execFile, spawn } from 'node:child_process'
 import { createServer } from 'node:net'
 import { promisify } from 'node:util'
+import { onStop } from './stops.mjs'
 
 const execFileAsync = promisify(execFile)
 
 export const isRoot = () => process.getuid?.() === 0
 
-/** Runs a program to its end with its output shown; rejects, naming the command, when it fails. */
+/** Asks a child process to end, insists after ten seconds, and waits until it has. */
+export async function endChild(child) {
+  if (child.exitCode !== null || child.signalCode !== null || child.pid === undefined) return
+  const ended = new Promise(resolve => child.once('exit', resolve))
+  child.kill('SIGTERM')
+  const timer = setTimeout(() => child.kill('SIGKILL'), 10_000)
+  await ended
+  clearTimeout(timer)
+}
+
+/** Runs a program to its end with its output shown; rejects, naming the command, when it fails. Ended when everything is stopped. */
 export function run(command, args, options = {}) {
   return new Promise((resolve, reject) => {
     const child = spawn(command, args, { stdio: ['ignore', 'inherit', 'inherit'], ...options })
-    child.on('error', error => reject(new Error(`${command}: ${error.message}`)))
-    child.on('exit', (code, signal) => code === 0
-      ? resolve()
-      : reject(new Error(`${command} ${args.join(' ')} ended with ${signal ?? `code ${code}`}`)))
+    const forget = onStop(() => endChild(child))
+    child.on('error', (error) => {
+      forget()
+      reject(new Error(`${command}: ${error.message}`))
+    })
+    child.on('exit', (code, signal) => {
+      forget()
+      if (code === 0) resolve()
+      else reject(new Error(`${command} ${args.join(' ')} ended with ${signal ?? `code ${code}`}`))
+    })
   })
 }
 
@@ -70,16 +87,10 @@ function isFree(port) {
   })
 }
 
-/** The port named by PORT, if it is a port and free; otherwise says so and ends. */
-export async function portOrExit(text) {
+/** The port named by PORT; throws where it is no port, or taken. */
+export async function freePortNamed(text) {
   const port = Number(text)
-  if (!Number.isInteger(port) || port < 1 || port > 65535) {
-    console.error(`PORT is ${text}: a whole number from 1 to 65535 is needed`)
-    process.exit(1)
-  }
-  if (!await isFree(port)) {
-    console.error(`Port ${port} is taken: set PORT to another, e.g. PORT=3001 npm run demo`)
-    process.exit(1)
-  }
+  if (!Number.isInteger(port) || port < 1 || port > 65535) throw new Error(`PORT is ${text}: a whole number from 1 to 65535 is needed`)
+  if (!await isFree(port)) throw new Error(`Port ${port} is taken: set PORT to another, e.g. PORT=3001 npm run demo`)
   return port
 }

@@ -39,4 +39,7 @@ export function sourceHash(root, paths) {
 export const buildSources = [
   'app', 'server', 'shared', 'drizzle', 'public', 'nuxt.config.ts', 'tailwind.config.ts', 'package-lock.json', 'tsconfig.json',
 ]
-export const seedSources = ['seed/world', 'seed/seed.ts', 'drizzle', 'shared/types/words.ts']
+/** What decides the rows of the demo world. */
+export const seedSources = [
+  'seed/world', 'seed/seed.ts', 'seed/write.ts', 'drizzle', 'server/db/schema', 'shared/types/words.ts', 'shared/seabed', 'shared/rode', 'shared/units',
+]

@@ -1,9 +1,8 @@
 // One throw-away cluster, one build and one seeded, fitted template database for all tests that talk to a server.
-import { rmSync } from 'node:fs'
 import { join } from 'node:path'
 import type { TestProject } from 'vitest/node'
-import { dataFolder, ensureBuild, ensureSeed, root } from '../../seed/host/project.mjs'
-import { startCluster } from '../../seed/host/cluster.mjs'
+import { dataFolder, ensureBuild, ensureSeed } from '../../seed/host/project.mjs'
+import { removeCluster, startCluster } from '../../seed/host/cluster.mjs'
 import { startServer } from './server'
 
 declare module 'vitest' {
@@ -18,20 +17,31 @@ interface Ground { url: string, stop: () => Promise<void> }
 let ground: Promise<Ground> | null = null
 let users = 0
 
+async function untilReleased(baseUrl: string) {
+  for (let wait = 0; wait < 300; wait++) {
+    const { releases } = await (await fetch(`${baseUrl}/api/releases`)).json() as { releases: unknown[] }
+    if (releases.length === 3) return
+    await new Promise(resolve => setTimeout(resolve, 200))
+  }
+  throw new Error('the releases of the demo world were not made within a minute')
+}
+
 async function lay(): Promise<Ground> {
   await ensureBuild()
+  const wanted = join(dataFolder, `tests-${process.pid}`)
   const cluster = await startCluster({
-    root, wanted: join(dataFolder, `tests-${process.pid}`), settings: { fsync: 'off', synchronous_commit: 'off', full_page_writes: 'off' },
+    wanted, settings: { fsync: 'off', synchronous_commit: 'off', full_page_writes: 'off' },
   })
   const stop = async () => {
     await cluster.stop()
-    rmSync(cluster.folder, { recursive: true, force: true })
+    removeCluster(wanted)
   }
   try {
     await cluster.createDatabase(templateName)
     await ensureSeed(cluster.url(templateName), {})
-    // The server itself makes the fit, as it would for anybody.
+    // The server itself makes the fit and then the releases, as it would for anybody.
     const server = await startServer(cluster.url(templateName))
+    await untilReleased(server.baseUrl)
     await server.stop()
     return { url: cluster.url('postgres'), stop }
   }

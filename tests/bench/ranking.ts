@@ -11,7 +11,7 @@ const catalogue = world.designs.slice(0, 16).map(({ slug, name, family }) => ({ 
 const plan = (lengthM: number): RankingRequest => ({
   boat: { type: 'sailMonohull', lengthM, beamM: 0.32 * lengthM },
   wind: { speedMs: 15.43, kind: 'gust' },
-  rode: { chain: { lengthM: 45, diameterMm: 10, grade: 'G40' }, snubber: { lengthM: 8, diameterMm: 14 } },
+  rode: { chain: { lengthM: 45, diameterMm: 10, grade: 'G40' }, snubber: { lengthM: 8, diameterMm: 14, construction: 'nylon3Strand' } },
   depthM: 8,
   massKg: 20,
   seabeds: (['soft-mud', 'sandy-mud', 'loose-sand', 'weed-over-sand'] as const).map(seabed => ({ seabed, share: 0.25 })),

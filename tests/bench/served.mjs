@@ -15,7 +15,7 @@ const connections = 10
 const plan = {
   boat: { type: 'sailMonohull', lengthM: 11.2, beamM: 3.6 },
   wind: { speedMs: 15.43, kind: 'gust' },
-  rode: { chain: { lengthM: 45, diameterMm: 10, grade: 'G40' }, snubber: { lengthM: 8, diameterMm: 14 } },
+  rode: { chain: { lengthM: 45, diameterMm: 10, grade: 'G40' }, snubber: { lengthM: 8, diameterMm: 14, construction: 'nylon3Strand' } },
   depthM: 8,
   seabeds: [{ seabed: 'soft-mud', share: 0.25 }, { seabed: 'sandy-mud', share: 0.25 }, { seabed: 'loose-sand', share: 0.25 }, { seabed: 'weed-over-sand', share: 0.25 }],
 }
@@ -57,8 +57,8 @@ async function pair(name, ours, bare) {
   for (let round = 0; round < rounds; round++) measured.push([await load(ours), await load(bare)])
   const figure = (side, key) => Math.round(median(measured.map(both => both[side][key])) * 10) / 10
   return {
-    what: name, 'requests/s': figure(0, 'rate'), 'bare requests/s': figure(1, 'rate'),
-    ratio: median(measured.map(([a, b]) => a.rate / b.rate)).toFixed(2), 'p99 ms': figure(0, 'p99'), 'bare p99 ms': figure(1, 'p99'),
+    'what': name, 'requests/s': figure(0, 'rate'), 'bare requests/s': figure(1, 'rate'),
+    'ratio': median(measured.map(([a, b]) => a.rate / b.rate)).toFixed(2), 'p99 ms': figure(0, 'p99'), 'bare p99 ms': figure(1, 'p99'),
   }
 }
 
@@ -91,6 +91,16 @@ async function delayDuringFit(server) {
   return [{ when: 'quiet, 3 s', ...quiet }, { when: `during a fit of 650 pulls, ${took} ms`, ...await ask() }]
 }
 
+/** Both loads, the rule table's mass, and the smallest real size that serves on each seabed, by survey load / by table load. */
+async function printReferenceBoats(base) {
+  const { boats } = await (await fetch(`${base}/api/reference-boats`)).json()
+  const kg = mass => mass === null ? 'none' : `${mass}`
+  printTable('Reference boats, 30 kn entered as a gust; smallest serving mass, kg, by survey load / by table load', boats.map(boat => ({
+    'boat': `${boat.lengthM} x ${boat.beamM} m`, 'survey kN': (boat.surveyN / 1000).toFixed(2), 'table kN': (boat.tableN / 1000).toFixed(2), 'rule table kg': boat.ruleTableKg,
+    ...Object.fromEntries(boat.seabeds.map(({ seabed, survey, table }) => [seabed, `${kg(survey.massKg)} / ${kg(table.massKg)}`])),
+  })))
+}
+
 export async function benchServed(databaseUrl) {
   await run(join(root, 'node_modules/.bin/nuxt'), ['build', join(root, 'tests/bench/bare')], {
     cwd: root, env: { ...process.env, NODE_ENV: 'production' }, stdio: ['ignore', 'ignore', 'inherit'],
@@ -102,6 +112,7 @@ export async function benchServed(databaseUrl) {
   try {
     await until(`${server.base}/api/ready`)
     printTable('Event loop delay of the server (ms)', await delayDuringFit(server))
+    await printReferenceBoats(server.base)
     const request = post(server.base, '/api/rankings', plan)
     const bytes = Buffer.byteLength(await (await fetch(request.url, request)).text())
     const bare = await start(join(root, 'tests/bench/bare/.output/server/index.mjs'), () => ({ BARE_BYTES: String(bytes) }))

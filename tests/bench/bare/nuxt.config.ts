@@ -1,8 +1,8 @@
 // The least that the same framework can do: what the product's routes and pages are measured against.
 export default defineNuxtConfig({
-  telemetry: false,
-  compatibilityDate: '2026-11-01',
-  srcDir: '.',
   devtools: { enabled: false },
+  srcDir: '.',
+  compatibilityDate: '2026-11-01',
   nitro: { preset: 'node-server' },
+  telemetry: false,
 })
