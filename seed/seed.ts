@@ -1,4 +1,4 @@
-// Migrates the database at DATABASE_URL, writes the demo world if it is not there, and asks for a refit.
+// Migrates the database at DATABASE_URL, writes the demo world if it is not there, and asks for a refit and for its releases.
 import { createHash } from 'node:crypto'
 import { fileURLToPath } from 'node:url'
 import { sql } from 'drizzle-orm'
@@ -8,6 +8,7 @@ import { designs, facts } from '../server/db/schema'
 import { transact } from '../server/db/transact'
 import { openQueue, queues, startQueue } from '../server/jobs/queue'
 import { makeWorld } from './world'
+import { worldReleases } from './world/releases'
 import { writeWorld } from './write'
 
 const fact = 'demo world'
@@ -16,7 +17,8 @@ const tables = 'trial_replies, pull_questions, releases, covariances, estimates,
 async function seed(url: string): Promise<string> {
   await applyMigrations(url, fileURLToPath(new URL('../drizzle', import.meta.url)))
   const world = makeWorld()
-  const hash = createHash('sha256').update(JSON.stringify(world)).digest('hex')
+  const releases = worldReleases(world)
+  const hash = createHash('sha256').update(JSON.stringify([world, releases])).digest('hex')
   const { db, pool, close } = connect(url)
   const boss = openQueue(url, error => console.error(error.message))
   try {
@@ -31,8 +33,9 @@ async function seed(url: string): Promise<string> {
       await writeWorld(tx, world)
       await tx.insert(facts).values({ name: fact, value: hash })
       await boss.send(queues.refit, {}, { db: plain })
+      for (const release of releases) await boss.send(queues.release, release, { db: plain, singletonKey: release.version })
     })
-    return `wrote ${world.designs.length} invented designs, ${world.trials.length} trials and ${world.pulls.length} pulls; a refit is queued`
+    return `wrote ${world.designs.length} invented designs, ${world.trials.length} trials and ${world.pulls.length} pulls; a refit and ${releases.length} releases are queued`
   }
   finally {
     await boss.stop({ graceful: false, close: true }).catch(() => {})

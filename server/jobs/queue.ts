@@ -1,6 +1,6 @@
 import PgBoss from 'pg-boss'
 
-export const queues = { refit: 'refit' } as const
+export const queues = { refit: 'refit', release: 'release' } as const
 
 /** A job queue in the database at `url`, not yet started. Errors of its own connections go to `onError`. */
 export function openQueue(url: string, onError: (error: Error) => void): PgBoss {
@@ -13,7 +13,7 @@ export function openQueue(url: string, onError: (error: Error) => void): PgBoss 
 export async function startQueue(boss: PgBoss): Promise<void> {
   await boss.start()
   for (const name of Object.values(queues)) {
-    // 'short': a refit that is asked for while one waits is the same refit.
+    // 'short': a refit that is asked for while one waits is the same refit; releases are told apart by their singleton key.
     await boss.createQueue(name, { name, policy: 'short', retryLimit: 5, retryDelay: 10, retryBackoff: true, expireInSeconds: 900 })
   }
 }

@@ -1,10 +1,13 @@
 import type PgBoss from 'pg-boss'
+import { releaseOrder } from '#shared/schemas/release'
 import { connect, type Connection } from '../db/client'
 import { applyMigrations } from '../db/migrate'
 import { ping } from '../db/queries/health'
 import { openQueue, queues, startQueue } from '../jobs/queue'
 import { log } from '../utils/log'
+import { validate } from '../utils/validate'
 import { currentEvidence, startEvidence, stopEvidence } from './evidence'
+import { makeRelease } from './makeRelease'
 import { refit } from './refit'
 
 interface Application { connection: Connection, boss: PgBoss | null, migrated: boolean, stopping: AbortController }
@@ -29,6 +32,16 @@ async function startJobs(url: string, { connection, stopping }: Application): Pr
   return boss
 }
 
+/** Releases are made one at a time, and only once readers have a fit to be answered from: a server that has just started answers first. */
+async function startReleases({ connection, boss, stopping }: Application): Promise<void> {
+  while (!stopping.signal.aborted && await currentEvidence() === null) await pause(500)
+  if (stopping.signal.aborted) return
+  await boss?.work(queues.release, { batchSize: 1, pollingIntervalSeconds: 1 }, async ([job]) => {
+    const order = validate(releaseOrder, job?.data)
+    log.info('made a release', { version: order.version, hash: await makeRelease(connection.db, order, stopping.signal) })
+  })
+}
+
 /** Migrates, starts the jobs and the evidence; waits for a database that is not there yet. */
 async function begin(url: string, migrations: string, app: Application): Promise<void> {
   while (!app.stopping.signal.aborted) {
@@ -37,6 +50,7 @@ async function begin(url: string, migrations: string, app: Application): Promise
       app.migrated = true
       app.boss = await startJobs(url, app)
       startEvidence(app.connection.db, url)
+      startReleases(app).catch(error => log.warn('releases are not being made', { error: (error as Error).message }))
       return
     }
     catch (error) {
