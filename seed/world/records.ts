@@ -25,6 +25,7 @@ export function pullRecords(world: World): PullRecord[] {
       movedN: pull.movedN,
       shankAngleDeg: trial.shankAngleDeg,
       setting: pull.setting,
+      ...(pull.end === null ? {} : { end: pull.end }),
       ...(pull.after === null ? {} : { after: pull.after }),
       ...(pull.veerOutcome === null ? {} : { veer: pull.veerOutcome }),
       ...(pull.fresh ? {} : { fresh: false }),

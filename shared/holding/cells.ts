@@ -1,4 +1,4 @@
-import { heldInterval } from '#shared/trial/observation'
+import { endedAtLimit, heldInterval } from '#shared/trial/observation'
 import type { PullRecord } from '#shared/types/holding'
 import type { Cell } from '#shared/holding/effects'
 
@@ -29,6 +29,6 @@ export function evidenceCounts(pulls: readonly PullRecord[]): { pulls: number, d
   return {
     pulls: fitted.length,
     days: new Set(fitted.map(pull => pull.trial)).size,
-    atLimit: fitted.filter(pull => pull.movedN === null).length,
+    atLimit: fitted.filter(endedAtLimit).length,
   }
 }

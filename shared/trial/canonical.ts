@@ -5,7 +5,7 @@ import type { PullRecord } from '#shared/types/holding'
 export function canonicalLine(pull: PullRecord): string {
   return JSON.stringify([
     pull.seabed, pull.trial, pull.design, pull.modification ?? null, pull.massKg, pull.family, pull.rig ?? null,
-    pull.calibrationSd ?? null, pull.set, pull.heldN, pull.movedN, pull.shankAngleDeg, pull.setting ?? null,
+    pull.calibrationSd ?? null, pull.set, pull.heldN, pull.movedN, pull.shankAngleDeg, pull.setting ?? null, pull.end ?? null,
     pull.after ?? null, pull.veer ?? null, pull.fresh ?? true, pull.pair ?? null,
   ])
 }

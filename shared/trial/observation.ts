@@ -34,3 +34,11 @@ export function middleLoadN({ heldN, movedN }: HeldInterval): number {
   if (movedN === Infinity) return heldN
   return heldN === 0 ? movedN / 2 : Math.sqrt(heldN * movedN)
 }
+
+/**
+ * Whether a pull that never moved was ended by the rig's limit, and not stopped before it. Where its end is not on record, a pull
+ * that never moved counts.
+ */
+export function endedAtLimit(pull: Pick<PullRecord, 'movedN' | 'end'>): boolean {
+  return pull.movedN === null && (pull.end === undefined || pull.end === 'atTheLimit')
+}

@@ -1,4 +1,4 @@
-import type { Family, NumberedSeabed, PullAfter, SettingOutcome, VeerOutcome } from './words'
+import type { Family, NumberedSeabed, PullAfter, PullEnd, SettingOutcome, VeerOutcome } from './words'
 
 /** One published pull as the fit takes it. Loads in N, horizontal at the anchor; angle of the shank in degrees. */
 export interface PullRecord {
@@ -21,6 +21,8 @@ export interface PullRecord {
   shankAngleDeg: number
   /** how it set; without it `set` alone decides (true: at the first try). Fouled pulls enter nothing. */
   setting?: SettingOutcome
+  /** how it ended; without it a pull that never moved counts as ended by the rig's limit */
+  end?: PullEnd
   /** what it did after breaking out; without it not tried */
   after?: PullAfter
   /** what it did when the load was turned; without it there was no veer pull */

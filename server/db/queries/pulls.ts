@@ -1,6 +1,6 @@
 import { and, asc, countDistinct, eq, isNotNull, isNull, ne } from 'drizzle-orm'
 import type { PullRecord } from '../../../shared/types/holding'
-import type { Family, NumberedSeabed, PullAfter, SettingOutcome, VeerOutcome } from '../../../shared/types/words'
+import type { Family, NumberedSeabed, PullAfter, PullEnd, SettingOutcome, VeerOutcome } from '../../../shared/types/words'
 import type { Database, Transaction } from '../client'
 import { designs, modifications, pulls, rigs, sizes, trials } from '../schema'
 
@@ -12,7 +12,7 @@ export async function publishedPulls(db: Database | Transaction): Promise<PullRe
     trial: trials.slug, rig: rigs.slug, calibrationSd: rigs.calibrationSd,
     design: designs.slug, family: designs.family, massKg: sizes.massKg, modification: modifications.slug,
     seabed: pulls.seabed, setting: pulls.setting, heldN: pulls.heldN, movedN: pulls.movedN,
-    shankAngleDeg: pulls.shankAngleDeg, after: pulls.after, veer: pulls.veer, fresh: pulls.fresh, pair: pulls.pair,
+    shankAngleDeg: pulls.shankAngleDeg, end: pulls.end, after: pulls.after, veer: pulls.veer, fresh: pulls.fresh, pair: pulls.pair,
   }).from(pulls)
     .innerJoin(trials, eq(trials.id, pulls.trialId))
     .innerJoin(rigs, eq(rigs.id, trials.rigId))
@@ -36,6 +36,7 @@ export async function publishedPulls(db: Database | Transaction): Promise<PullRe
     movedN: row.movedN,
     shankAngleDeg: row.shankAngleDeg,
     ...row.fresh ? {} : { fresh: false },
+    ...row.end === null ? {} : { end: row.end as PullEnd },
     ...row.after === null ? {} : { after: row.after as PullAfter },
     ...row.veer === null ? {} : { veer: row.veer as VeerOutcome },
     ...row.pair === null ? {} : { pair: row.pair },
