@@ -1,3 +1,4 @@
+import { isInternal } from '../utils/address'
 import { isLoopback } from '../utils/configuration'
 
 /**
@@ -5,7 +6,7 @@ import { isLoopback } from '../utils/configuration'
  * that leads to 127.0.0.1. People are sent to the one origin that everything else is made for.
  */
 export default defineEventHandler((event) => {
-  if (process.env.KEDGEWISE_DEMO !== '1' || !event.node.req.socket?.remoteAddress) return
+  if (process.env.KEDGEWISE_DEMO !== '1' || isInternal(event)) return
   const host = getRequestHeader(event, 'host') ?? ''
   const name = host.replace(/:\d+$/, '')
   if (!isLoopback(name)) throw createError({ statusCode: 421, message: 'The demo answers on loopback only' })

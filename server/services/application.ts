@@ -1,7 +1,9 @@
 import type PgBoss from 'pg-boss'
+import { modelVersion } from '#shared/holding/version'
 import { releaseOrder } from '#shared/schemas/release'
 import { connect, type Connection } from '../db/client'
 import { applyMigrations } from '../db/migrate'
+import { standingModel } from '../db/queries/fits'
 import { ping } from '../db/queries/health'
 import { openQueue, queues, startQueue } from '../jobs/queue'
 import { log } from '../utils/log'
@@ -24,7 +26,16 @@ const pause = (ms: number) => new Promise(resolve => setTimeout(resolve, ms))
 
 async function startJobs(url: string, { connection, stopping }: Application): Promise<PgBoss> {
   const boss = openQueue(url, error => log.warn('the job queue lost its connection', { error: error.message }))
-  await startQueue(boss)
+  try {
+    await startQueue(boss)
+  }
+  catch (error) {
+    await boss.stop({ graceful: false, close: true, timeout: 2000 }).catch(() => {})
+    throw error
+  }
+  // Pulls that an older model was fitted to are fitted again by this one.
+  const model = await standingModel(connection.db)
+  if (model !== null && model !== modelVersion) await boss.send(queues.refit, {})
   await boss.work(queues.refit, { batchSize: 1, pollingIntervalSeconds: 1 }, async () => {
     const fit = await refit(connection.db, stopping.signal)
     log.info('refitted', { fit })
@@ -49,6 +60,8 @@ async function begin(url: string, migrations: string, app: Application): Promise
       await applyMigrations(url, migrations)
       app.migrated = true
       app.boss = await startJobs(url, app)
+      // Told to stop meanwhile: what stopApplication() did not know of yet is stopped here.
+      if (app.stopping.signal.aborted) return void await app.boss.stop({ graceful: false, close: true, timeout: 2000 })
       startEvidence(app.connection.db, url)
       startReleases(app).catch(error => log.warn('releases are not being made', { error: (error as Error).message }))
       return

@@ -5,6 +5,7 @@ import { listen } from '../db/listen'
 import { listCatalogue } from '../db/queries/catalogue'
 import { fitChannel, newestFitId, readFit } from '../db/queries/fits'
 import { countRigs } from '../db/queries/pulls'
+import { log } from '../utils/log'
 
 /** What answers rest on: the newest fit, the designs with their sizes, how many rigs made the pulls. */
 export interface Evidence { fit: StoredFit, catalogue: CatalogueDesign[], rigs: number }
@@ -15,22 +16,32 @@ const pollMs = 15_000
 
 let source: Source | null = null
 let held: Evidence | null = null
-let reading: Promise<void> | null = null
+let running: Promise<void> | null = null
+let wanted = false
 
 async function read(db: Database): Promise<void> {
   const id = await newestFitId(db)
-  if (id === null || id === held?.fit.id) return
-  const [fit, catalogue, rigs] = await Promise.all([readFit(db, id), listCatalogue(db), countRigs(db)])
+  if (id === null) return
+  const fit = id === held?.fit.id ? held.fit : await readFit(db, id)
+  const [catalogue, rigs] = await Promise.all([listCatalogue(db), countRigs(db)])
   if (fit) held = { fit, catalogue, rigs }
 }
 
-// One reading at a time; a notice that comes meanwhile is answered by one more.
+/**
+ * Reads what there is to read. One reading at a time: whoever asks while one runs waits for it, and what was noticed meanwhile is
+ * answered by one more, however many noticed it.
+ */
 function refresh(db: Database): Promise<void> {
-  const next = (reading ?? Promise.resolve()).then(() => read(db)).catch(() => {}).finally(() => {
-    if (reading === next) reading = null
+  wanted = true
+  running ??= (async () => {
+    while (wanted) {
+      wanted = false
+      await read(db).catch(error => log.warn('the evidence could not be read', { error: (error as Error).message }))
+    }
+  })().finally(() => {
+    running = null
   })
-  reading = next
-  return next
+  return running
 }
 
 /** Starts to keep the newest fit in memory: told by the database at once, asked again every 15 s in case a notice was lost. */
@@ -51,6 +62,6 @@ export async function stopEvidence(): Promise<void> {
 
 /** The evidence that answers rest on now; null until there is a fit. */
 export async function currentEvidence(): Promise<Evidence | null> {
-  if (!held && source) await refresh(source.db)
+  if (!held && source) await (running ?? refresh(source.db))
   return held
 }

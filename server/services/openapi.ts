@@ -1,5 +1,6 @@
 import * as z from 'zod/mini'
 import { problem } from '#shared/schemas/answers/problem'
+import { examples } from '../utils/examples'
 import { operations, type Operation } from '../utils/operations'
 
 type Json = Record<string, unknown>
@@ -27,26 +28,32 @@ const nameOf = (id: string, kind: string) => `${id[0]?.toUpperCase()}${id.slice(
 const reference = (name: string) => ({ $ref: `#/components/schemas/${name}` })
 const json = (schema: Json) => ({ 'application/json': { schema } })
 
-function parametersIn(place: 'path' | 'query', shape: z.ZodMiniObject | undefined): Json[] {
+/** What a route that sends files answers with, by the kind of file. */
+const files = { 'text/csv': { schema: { type: 'string' } }, 'application/json': { schema: { type: 'object' } }, 'application/x-tar': { schema: { type: 'string', format: 'binary' } } }
+
+function parametersIn(place: 'path' | 'query', shape: z.ZodMiniObject | undefined, id: string): Json[] {
   if (!shape) return []
+  const example = examples[id]?.address ?? {}
   const { properties = {}, required = [] } = schemaOf(shape, 'input') as { properties?: Record<string, Json>, required?: string[] }
-  return Object.entries(properties).map(([name, { description, ...schema }]) => ({ name, in: place, required: required.includes(name), description, schema }))
+  return Object.entries(properties).map(([name, { description, ...schema }]) => ({
+    name, in: place, required: required.includes(name), description, schema, ...(name in example && { example: example[name] }),
+  }))
 }
 
-function responses({ id, answer, status = 200, refusals }: Operation): Json {
+function responses({ id, answer, sendsFiles, status = 200, refusals }: Operation): Json {
   const refused = [...refusals, 405, 500].map(status => [status, { description: reasons[status], content: json(reference('Problem')) }])
-  const answered = answer ? json(reference(nameOf(id, 'Answer'))) : json({ type: 'object' })
+  const answered = sendsFiles ? files : answer ? json(reference(nameOf(id, 'Answer'))) : json({ type: 'object' })
   return Object.fromEntries([[status, { description: 'The answer', content: answered }], ...refused])
 }
 
 function operationObject(operation: Operation): Json {
   const { id, summary, request, params, query } = operation
-  const parameters = [...parametersIn('path', params), ...parametersIn('query', query)]
+  const parameters = [...parametersIn('path', params, id), ...parametersIn('query', query, id)]
   return {
     operationId: id,
     summary,
     ...(parameters.length > 0 && { parameters }),
-    ...(request && { requestBody: { required: true, content: json(reference(nameOf(id, 'Request'))) } }),
+    ...(request && { requestBody: { required: true, content: { 'application/json': { schema: reference(nameOf(id, 'Request')), example: examples[id]?.body } } } }),
     responses: responses(operation),
   }
 }

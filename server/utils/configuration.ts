@@ -28,7 +28,7 @@ function parsed(text: string): URL | null {
 /** Why a secret is too weak to seal a session with, or null. */
 function weakness(secret: string): string | null {
   if (secret.length < 32) return `has ${secret.length} characters, at least 32 are needed`
-  if (new Set(secret).size < 10) return 'repeats too few different characters: use a random one'
+  if (new Set(secret).size < 10 || /^(.+?)\1+$/.test(secret)) return 'repeats itself: use a random one'
   if (/change|password|secret|example|kedgewise|12345/i.test(secret)) return 'looks like a placeholder: use a random one'
   return null
 }

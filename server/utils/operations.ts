@@ -24,7 +24,6 @@ import { rodeRequest } from '#shared/schemas/rode'
 
 /** A route of the API as it is described and allowed: one method, what it takes, what it answers. */
 export interface Operation {
-  /** as OpenAPI writes it: a part in braces stands for any one name */
   /** a name in braces stands for one part of an address: /api/designs/{slug} */
   path: string
   method: 'GET' | 'POST'
@@ -37,6 +36,8 @@ export interface Operation {
   /** the query of a GET */
   query?: z.ZodMiniObject
   answer?: z.ZodMiniType
+  /** answers with a file to be saved */
+  sendsFiles?: true
   /** 201 where the request makes something; 200 otherwise */
   status?: 200 | 201
   /** refusals besides those of every route */
@@ -68,7 +69,7 @@ export const operations: readonly Operation[] = [
   { path: '/api/reference-boats', method: 'GET', id: 'referenceBoats', summary: 'Three reference boats and the smallest sizes that serve', answer: referenceBoatsAnswer, refusals: [429, 503] },
   { path: '/api/releases', method: 'GET', id: 'releases', summary: 'Frozen editions of the data, newest first', query: releasesQuery, answer: releasesAnswer, refusals: [422, 429, 503] },
   { path: '/api/releases/{version}', method: 'GET', id: 'release', summary: 'One edition of the data: its files, and what changed', params: releaseParams, answer: releaseAnswer, refusals: [404, 422, 429, 503] },
-  { path: '/api/releases/{version}/{file}', method: 'GET', id: 'releaseFile', summary: 'A file of a release, to be saved', params: releaseFileParams, refusals: [404, 422, 429, 503] },
+  { path: '/api/releases/{version}/{file}', method: 'GET', id: 'releaseFile', summary: 'A file of a release, to be saved', params: releaseFileParams, sendsFiles: true, refusals: [404, 422, 429, 503] },
   { path: '/api/openapi.json', method: 'GET', id: 'openapi', summary: 'This description', refusals: [] },
   { path: '/api/health', method: 'GET', id: 'health', summary: 'The server is alive', answer: aliveAnswer, refusals: [] },
   { path: '/api/ready', method: 'GET', id: 'ready', summary: 'The server can answer', answer: readyAnswer, refusals: [503] },

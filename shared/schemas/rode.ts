@@ -10,7 +10,7 @@ const sizeIn = z.string(sizeWords).check(
 )
 const breakingN = quantity(1, 20_000_000, 'N', 'Breaking strength')
 const diameterMm = quantity(2, 120, 'mm', 'Nominal diameter')
-const construction = z.optional(oneOf(ropeConstructions, 'Construction; nylon3Strand if left out'))
+const construction = z.optional(oneOf(ropeConstructions, 'Construction; unknown if left out, and so are its strength and stretch unless breakingN is given'))
 
 interface Sized { diameterMm?: number | undefined, sizeIn?: string | undefined }
 

@@ -42,6 +42,7 @@ describe('the database keeps its own house', () => {
     `insert into pulls (trial_id, ordinal, design_id, size_id, seabed, setting, first_try, held_n${columns}) values (1, 9999, 1, 1, ${values})`
 
   it.each([
+    ['a size of another design', 'pulls_size_of_design', pull(', moved_n', '\'loose-sand\', \'set\', true, 100, 200').replace('1, 9999, 1, 1', '1, 9999, 1, (select max(id) from sizes where design_id <> 1)')],
     ['a seabed without a number', 'pulls_seabed_numbered', pull(', moved_n', '\'rock\', \'set\', true, 100, 200')],
     ['a step that moved at or below the one held', 'pulls_moved_above_held', pull(', moved_n', '\'loose-sand\', \'set\', true, 500, 500')],
     ['a load held without having set', 'pulls_never_set_held_nothing', pull('', '\'loose-sand\', \'neverSet\', false, 500')],

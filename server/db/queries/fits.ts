@@ -14,6 +14,21 @@ export async function newestFitId(db: Database | Transaction): Promise<number | 
   return row?.id ?? null
 }
 
+/** Any constant of our own, other than the migrations'. */
+const fitsLock = 5_172_022
+
+/** Lets one transaction at a time decide which fit stands; let go of when it ends. */
+export async function lockFits(tx: Transaction): Promise<void> {
+  await tx.execute(sql`select pg_advisory_xact_lock(${fitsLock})`)
+}
+
+/** The model of the fit that readers are answered from, or null. */
+export async function standingModel(db: Database | Transaction): Promise<string | null> {
+  const id = await newestFitId(db)
+  const [row] = id === null ? [] : await db.select({ modelVersion: fits.modelVersion }).from(fits).where(eq(fits.id, id))
+  return row?.modelVersion ?? null
+}
+
 /** Lets readers be answered from a stored fit from now on, and tells every instance when the transaction commits. */
 export async function letStand(tx: Transaction, fitId: number): Promise<void> {
   await tx.update(fits).set({ standsFrom: sql`clock_timestamp()` }).where(eq(fits.id, fitId))

@@ -1,4 +1,4 @@
-import { and, asc, countDistinct, eq, isNotNull, isNull, ne } from 'drizzle-orm'
+import { and, asc, count, countDistinct, eq, isNotNull, isNull, max, ne } from 'drizzle-orm'
 import type { PullRecord } from '../../../shared/types/holding'
 import type { Family, NumberedSeabed, PullAfter, PullEnd, SettingOutcome, VeerOutcome } from '../../../shared/types/words'
 import type { Database, Transaction } from '../client'
@@ -41,6 +41,17 @@ export async function publishedPulls(db: Database | Transaction): Promise<PullRe
     ...row.veer === null ? {} : { veer: row.veer as VeerOutcome },
     ...row.pair === null ? {} : { pair: row.pair },
   }))
+}
+
+/**
+ * A mark of the published pulls that stand: another one as soon as a pull is published, corrected or withdrawn. Cheap to compare
+ * before and after work that takes long.
+ */
+export async function publishedMark(db: Database | Transaction): Promise<string> {
+  const [row] = await db.select({ pulls: count(), newest: max(pulls.id), trials: countDistinct(pulls.trialId) }).from(pulls)
+    .innerJoin(trials, eq(trials.id, pulls.trialId))
+    .where(published)
+  return `${row?.pulls ?? 0}/${row?.newest ?? 0}/${row?.trials ?? 0}`
 }
 
 /** How many rigs made the published pulls: with one, a bias common to all of them cannot be seen. */

@@ -49,6 +49,7 @@ export const sizes = pgTable('sizes', {
   priceOn: date('price_on', { mode: 'string' }),
 }, table => [
   unique('sizes_design_mass').on(table.designId, table.massKg),
+  unique('sizes_id_design').on(table.id, table.designId),
   within('sizes_mass_range', table.massKg, 0.5, 2000),
   within('sizes_shank_length_range', table.shankLengthMm, 50, 5000),
   within('sizes_fluke_width_range', table.flukeWidthMm, 20, 5000),

@@ -1,6 +1,6 @@
 import { sql } from 'drizzle-orm'
 import type { AnyPgColumn } from 'drizzle-orm/pg-core'
-import { boolean, check, date, doublePrecision, index, integer, jsonb, pgTable, serial, text, unique } from 'drizzle-orm/pg-core'
+import { boolean, check, date, doublePrecision, foreignKey, index, integer, jsonb, pgTable, serial, text, unique } from 'drizzle-orm/pg-core'
 import {
   attitudes, conditions, foulings, numberedSeabeds, pullAfters, pullEnds, settingOutcomes, veerOutcomes,
 } from '../../../shared/types/words'
@@ -71,7 +71,7 @@ export const pulls = pgTable('pulls', {
   trialId: integer('trial_id').notNull().references(() => trials.id),
   ordinal: integer().notNull(),
   designId: integer('design_id').notNull().references(() => designs.id),
-  sizeId: integer('size_id').notNull().references(() => sizes.id),
+  sizeId: integer('size_id').notNull(),
   modificationId: integer('modification_id').references(() => modifications.id),
   anchorSetting: text('anchor_setting'),
   /** the same text on both pulls of a back-to-back pair */
@@ -100,6 +100,8 @@ export const pulls = pgTable('pulls', {
   recordedAt: moment('recorded_at').notNull().defaultNow(),
 }, table => [
   unique('pulls_trial_ordinal').on(table.trialId, table.ordinal),
+  // The mass comes from the size and the name from the design: they must be of one anchor.
+  foreignKey({ name: 'pulls_size_of_design', columns: [table.sizeId, table.designId], foreignColumns: [sizes.id, sizes.designId] }),
   index('pulls_design_seabed').on(table.designId, table.seabed),
   index('pulls_seabed').on(table.seabed),
   index('pulls_modification').on(table.modificationId).where(sql`modification_id is not null`),
