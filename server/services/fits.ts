@@ -1,7 +1,7 @@
 import type { FitAnswer, FitRequest } from '#shared/types/fit'
 import { ApiError, invalid } from '../utils/errors'
 import { FitTimeout, runFit } from './fitWorker'
-import { NoPlace, Turns } from './turns'
+import { GaveUp, NoPlace, Turns } from './turns'
 
 /** One fit at a time, four that wait. */
 export const mostWaiting = 4
@@ -23,6 +23,7 @@ export async function fits(request: FitRequest, gone?: AbortSignal, run: typeof 
     if (error instanceof NoPlace) {
       throw new ApiError(429, 'busy', `One fit runs and ${mostWaiting} wait: try again in ${retryAfterS} s`, { headers: { 'Retry-After': String(retryAfterS) } })
     }
+    if (error instanceof GaveUp || gone?.aborted) throw new ApiError(503, 'busy', 'Nobody waits for this answer any more')
     if (error instanceof FitTimeout) throw invalid({ pulls: 'must be fewer: this fit takes longer than 30 s' })
     throw error
   }

@@ -1,11 +1,7 @@
 import { columnsOf } from '#shared/holding/columns'
 import { heldInterval } from '#shared/trial/observation'
-import type { FitPull } from '#shared/types/fit'
+import { mostEffects, mostPulls, type FitPull } from '#shared/types/fit'
 import type { PullRecord } from '#shared/types/holding'
-
-/** Most pulls, and most effects before anchor-day effects, that one request may ask to be fitted. */
-export const mostPulls = 5000
-export const mostEffects = 1000
 
 /** A pull of a request as a record: set unless said otherwise, a flat pull unless an angle is given. */
 export function recordOf(pull: FitPull): PullRecord {

@@ -33,9 +33,9 @@ export function counted(count: number, noun: string): string {
   return `${count} ${noun}${count === 1 ? '' : 's'}`
 }
 
-/** A holding wind in words: `mean 24 kn, gusting 36`, `at least mean 17 kn, gusting 26`. */
+/** A holding wind in words, rounded down so that it never reads as more than was worked out: `mean 24 kn, gusting 36`, `at least mean 17 kn, gusting 26`. */
 export function inWords(wind: HoldingWind): string {
   if ('reason' in wind) return wind.reason === 'beyond64kn' ? 'past gusts of 64 kn' : 'not even in calm'
-  const knots = (speedMs: number) => (speedMs / KN_MS).toFixed(0)
+  const knots = (speedMs: number) => Math.floor(speedMs / KN_MS + 1e-9)
   return `${wind.atLeast ? 'at least ' : ''}mean ${knots(wind.meanMs)} kn, gusting ${knots(wind.gustMs)}`
 }

@@ -16,12 +16,13 @@ export interface Size { mm: number, inch: number | null }
  * @throws FieldError when it is not such a size
  */
 export function parseInch(text: string, field: string): number {
-  const found = /^(?:(\d{1,2})(?:\s+|-|$))?(?:(\d{1,2})\/(\d{1,2}))?$/.exec(text.trim().replace(/\s*(?:"|″|in)$/, ''))
-  const decimal = /^\d{0,2}\.\d{1,4}$/.test(text.trim())
+  const bare = text.trim().replace(/\s*(?:"|″|in)$/, '')
+  const found = /^(?:(\d{1,2})(?:\s+|-|$))?(?:(\d{1,2})\/(\d{1,2}))?$/.exec(bare)
+  const decimal = /^\d{0,2}\.\d{1,4}$/.test(bare)
   if (text.length > 20 || !(found?.[1] || found?.[2] || decimal)) {
     throw new FieldError(field, `${field} must be a size in inches such as 3/8, got ${text.slice(0, 40)}`)
   }
-  const inch = decimal ? Number(text) : Number(found?.[1] ?? 0) + Number(found?.[2] ?? 0) / Number(found?.[3] ?? 1)
+  const inch = decimal ? Number(bare) : Number(found?.[1] ?? 0) + Number(found?.[2] ?? 0) / Number(found?.[3] ?? 1)
   mustBeWithin(field, inch, 1 / 16, 12)
   return inch
 }

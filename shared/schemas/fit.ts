@@ -1,5 +1,6 @@
 import * as z from 'zod/mini'
 import { families, numberedSeabeds } from '#shared/types/words'
+import { mostEffects, mostPulls } from '#shared/types/fit'
 import { fieldsOf, listOf, oneOf, quantity, saying, shortText, yesOrNo } from './fields'
 
 const load = quantity(0, 5_000_000, 'N', 'Load')
@@ -31,13 +32,11 @@ export const fitPull = fieldsOf({
 
 type Pull = z.output<typeof fitPull>
 
-/** Most effects besides those of an anchor's day that a fit may have. */
-export const mostEffects = 1000
-
-/** Effects of the model besides those of an anchor's day: two a seabed, and one each for families, designs and modifications, there and over all, trials and rigs. */
+/** Effects of the model besides those of an anchor's day, of the pulls that set: two a seabed, and one each for families, designs and modifications, there and over all, trials and rigs. */
 export function countEffects(pulls: readonly Pull[]): number {
   const effects = new Set<string>()
-  for (const { trial, design, family, seabed, modification, rig } of pulls) {
+  for (const { trial, design, family, seabed, modification, rig, set } of pulls) {
+    if (set === false) continue
     const names = [['mean', seabed], ['exponent', seabed], ['family', family, seabed], ['design', design], ['design', design, seabed], ['trial', trial]]
     if (modification !== undefined) names.push(['modification', design, modification], ['modification', design, modification, seabed])
     if (rig !== undefined) names.push(['rig', rig])
@@ -71,6 +70,6 @@ const manageable = z.superRefine<Pull[]>((pulls, context) => {
 
 /** POST /api/fits: what would these pulls say? */
 export const fitRequest = fieldsOf({
-  pulls: listOf(fitPull, 1, 5000, 'Pulls').check(consistent, manageable),
+  pulls: listOf(fitPull, 1, mostPulls, 'Pulls').check(consistent, manageable),
   pooled: z.optional(yesOrNo('False: one free mean per design and seabed, nothing shared; true if left out')),
 }, 'Pulls to fit; nothing is stored')

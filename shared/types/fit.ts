@@ -1,6 +1,10 @@
 import type { Family, NumberedSeabed } from './words'
 import type { HoldingSds } from './holding'
 
+/** Most pulls, and most effects before anchor-day effects, that one request may ask to be fitted. */
+export const mostPulls = 5000
+export const mostEffects = 1000
+
 /** A pull as a tester sends it to ask what it would say. */
 export interface FitPull {
   trial: string
