@@ -7,7 +7,7 @@ const pauseMs = 160
 interface Refusal { statusCode?: number, data?: { statusCode?: number, message?: string, fields?: Record<string, string> } }
 
 /** What a refused or failed ranking means to the reader; load and rode stand in any case. */
-function explain(error: unknown): RankingReply {
+function explain(error: unknown): Omit<RankingReply, 'asked'> {
   const { statusCode, data } = error as Refusal
   const status = data?.statusCode ?? statusCode
   if (status === 422) {
@@ -24,12 +24,13 @@ function explain(error: unknown): RankingReply {
 
 async function ask(request: RankingRequest | null, signal?: AbortSignal): Promise<RankingReply | null> {
   if (!request) return null
+  const asked = { ownMassKg: request.own?.massKg ?? null, target: request.target ?? 0.9 }
   try {
     const answer = await $fetch<RankingAnswer>('/api/rankings', { method: 'POST', body: request, signal, retry: 0 })
-    return { answer, problem: null, issues: [] }
+    return { answer, asked, problem: null, issues: [] }
   }
   catch (error) {
-    return signal?.aborted ? null : explain(error)
+    return signal?.aborted ? null : { ...explain(error), asked }
   }
 }
 

@@ -21,7 +21,7 @@ export function useShow() {
     speed: (speedMs: number): string => formatQuantity(speedMs, 'speed', system.value, { decimals: system.value === 'metric' ? 1 : 0 }),
     force: (loadN: number): string => formatQuantity(loadN, 'force', system.value, imperial.value ? { decimals: 0 } : { decimals: forceDecimals(loadN) }),
     forceNumber: (loadN: number): string => formatNumber(loadN, 'force', system.value, { decimals: imperial.value ? 0 : forceDecimals(loadN) }),
-    area: (areaM2: number): string => formatQuantity(areaM2, 'area', system.value, { decimals: 1 }),
+    area: (areaM2: number): string => formatQuantity(areaM2, 'area', system.value, { decimals: areaM2 < 1 ? 2 : 1 }),
     diameter: (diameterM: number): string => imperial.value ? formatInches(diameterM) : formatQuantity(diameterM, 'diameter', system.value),
     degrees: (deg: number): string => `${deg.toFixed(deg > 0 && deg < 9.95 ? 1 : 0)}°`,
     percent: (share: number): string => share < 0.01 ? 'under 1 %' : share > 0.99 ? 'over 99 %' : `${(share * 100).toFixed(0)} %`,

@@ -3,6 +3,9 @@ import type { Browser } from 'playwright-core'
 import { startApp, type TestApp } from '../api/harness'
 import { expectAccessible, launch, meanLuminance, open, watch } from './browser'
 
+/** How long the page may take to follow on a busy machine. */
+const soon = { timeout: 15_000 }
+
 let app: TestApp
 let browser: Browser
 beforeAll(async () => {
@@ -76,7 +79,7 @@ describe('day, night and sun', () => {
     await page.selectOption('select[name=display]', 'night')
     await page.selectOption('select[name=units]', 'imperial')
     if (!javaScriptEnabled) await page.getByRole('button', { name: 'Set' }).click()
-    await expect.poll(() => page.locator('html').getAttribute('data-mode')).toBe('night')
+    await expect.poll(() => page.locator('html').getAttribute('data-mode'), soon).toBe('night')
     expect(page.url()).toMatch(/\/plan\?.*length=9/)
     expect(page.url()).not.toMatch(/display=|units=/)
     expect((await context.cookies()).map(({ name, value }) => `${name}=${value}`)).toEqual(['preference=night.imperial'])

@@ -3,6 +3,9 @@ import type { Browser, Page } from 'playwright-core'
 import { startApp, type TestApp } from '../api/harness'
 import { choose, launch, open, retype, tabTo, watch } from './browser'
 
+/** How long the page may take to follow on a busy machine. */
+const soon = { timeout: 15_000 }
+
 let app: TestApp
 let browser: Browser
 beforeAll(async () => {
@@ -19,9 +22,12 @@ const caption = (page: Page) => page.locator('figcaption p').first()
 const ranking = async (page: Page) => (await page.locator('.ranking .main').allInnerTexts()).join('\n')
 const verdict = (page: Page) => page.locator('#own-verdict')
 
+/** Waits until the ranking on the page is the answer to the words on the page. */
+const settled = (page: Page) => expect.poll(() => page.locator('[aria-busy=true]').count(), soon).toBe(0)
+
 /** Waits for the page to say something else than before: the ranking follows from the server. */
 async function changed(read: () => Promise<string>, before: string): Promise<string> {
-  await expect.poll(read, { timeout: 15_000 }).not.toBe(before)
+  await expect.poll(read, soon).not.toBe(before)
   return read()
 }
 
@@ -37,18 +43,18 @@ describe('a plan by keyboard', () => {
     expect(await page.getByText('10.668 m').or(page.getByText('10.67 m')).count()).toBeGreaterThan(0)
 
     await retype(page, 'plan-wind', '12 kn')
-    await expect.poll(() => caption(page).innerText()).toMatch(/lies on the bottom: the pull on the anchor is flat/)
+    await expect.poll(() => caption(page).innerText(), soon).toMatch(/lies on the bottom: the pull on the anchor is flat/)
     const calm = await ranking(page)
     await retype(page, 'plan-wind', '42 kn')
-    await expect.poll(() => caption(page).innerText()).toMatch(/rode pulls the shank up|lifts the shank/)
+    await expect.poll(() => caption(page).innerText(), soon).toMatch(/rode pulls the shank up|lifts the shank/)
     const storm = await changed(() => ranking(page), calm)
 
     await retype(page, 'plan-chain', '90 m')
-    await expect.poll(() => caption(page).innerText()).toMatch(/lies on the bottom|just lifts/)
+    await expect.poll(() => caption(page).innerText(), soon).toMatch(/lies on the bottom|just lifts/)
     const longer = await changed(() => ranking(page), storm)
 
     await choose(page, 'plan-bed-more', 'weed over s')
-    await expect.poll(() => page.locator('#plan-bed2').inputValue()).toBe('weed-over-sand')
+    await expect.poll(() => page.locator('#plan-bed2').inputValue(), soon).toBe('weed-over-sand')
     expect(await page.inputValue('#plan-share2')).toBe('33 %')
     await changed(() => ranking(page), longer)
 
@@ -56,10 +62,11 @@ describe('a plan by keyboard', () => {
     await page.keyboard.press('ArrowDown')
     await retype(page, 'plan-ownmass', '16 kg')
     await verdict(page).waitFor()
+    await settled(page)
     const judged = await verdict(page).innerText()
     expect(judged).toMatch(/of 16 kg (holds|is marginal|does not hold|has not been tested enough)/)
 
-    await expect.poll(() => page.url()).toMatch(/ownmass=16/)
+    await expect.poll(() => page.url(), soon).toMatch(/ownmass=16/)
     const before = await ranking(page)
     await page.reload({ waitUntil: 'networkidle' })
     expect(await verdict(page).innerText()).toBe(judged)
@@ -81,7 +88,7 @@ describe('a plan by keyboard', () => {
     const chain = () => page.locator('svg.drawing').first().locator('path.moves').first().getAttribute('d')
     const lifted = await chain()
     await retype(page, 'plan-wind', '10 kn')
-    await expect.poll(chain).not.toBe(lifted)
+    await expect.poll(chain, soon).not.toBe(lifted)
     const [angle] = await page.getByRole('row', { name: 'Angle at the shank' }).getByRole('cell').allInnerTexts()
     expect(angle).toBe('0°')
     expect(said).toEqual([])
@@ -94,7 +101,29 @@ describe('a plan by keyboard', () => {
     await page.getByRole('link', { name: 'Method', exact: true }).click()
     await page.getByRole('heading', { name: 'The method' }).waitFor()
     await page.goBack()
-    await expect.poll(() => page.inputValue('#plan-length')).toBe('9 m')
+    await expect.poll(() => page.inputValue('#plan-length'), soon).toBe('9 m')
+    expect(said).toEqual([])
+    await close()
+  })
+})
+
+describe('a page that is slow to come alive', () => {
+  it('keeps what was typed and opened before', async () => {
+    const { page, said, close } = await watch(browser)
+    // While the page is still being read, before any script of it runs.
+    await page.addInitScript(() => {
+      const reader = new MutationObserver(() => {
+        const length = document.querySelector<HTMLInputElement>('#plan-length')
+        if (length) length.value = '9 m'
+        for (const details of document.querySelectorAll('details')) details.open = true
+      })
+      reader.observe(document, { childList: true, subtree: true })
+      document.addEventListener('DOMContentLoaded', () => reader.disconnect())
+    })
+    await open(page, `${app.baseUrl}/plan`)
+    await expect.poll(() => page.url(), soon).toMatch(/length=9/)
+    expect(await page.inputValue('#plan-length')).toBe('9 m')
+    expect(await page.locator('details:not([open])').count()).toBe(0)
     expect(said).toEqual([])
     await close()
   })
@@ -121,6 +150,15 @@ describe('a plan that cannot be worked out', () => {
     expect(await page.evaluate(() => document.activeElement?.id)).toBe('plan-rise')
     expect(await page.inputValue('#plan-rise')).toBe('much')
     expect(said).toEqual([])
+    await close()
+  })
+
+  it.each([true, false])('marks what only the server can refuse, and keeps load and rode (JavaScript: %s)', async (javaScriptEnabled) => {
+    const { page, close } = await watch(browser, { javaScriptEnabled })
+    await open(page, `${app.baseUrl}/plan?own=no-such-design&ownmass=15+kg`)
+    expect(await page.getByRole('alert').innerText()).toMatch(/My own anchor/)
+    expect(await page.locator('#plan-own-issue').count()).toBe(1)
+    expect(await page.getByRole('heading', { name: 'Survey load' }).count()).toBe(1)
     await close()
   })
 
