@@ -16,3 +16,16 @@ export function matrixBlocks(columns: readonly MatrixColumn[], rows: readonly Ma
     return block
   })
 }
+
+/** A row of the wide drawing, as high as its label needs. */
+export interface MatrixLine { row: MatrixRow, label: readonly string[], top: number, height: number, index: number }
+
+export function matrixRows(rows: readonly MatrixRow[], head: number, most: number): MatrixLine[] {
+  let top = head
+  return rows.map((row, index) => {
+    const label = wrapped(row.label, most)
+    const line = { row, label, top, height: Math.max(18 * label.length + 14, 52), index }
+    top += line.height
+    return line
+  })
+}

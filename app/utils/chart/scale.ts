@@ -13,6 +13,9 @@ export interface ChartScale {
   ticks: readonly number[]
 }
 
+/** A round value of an axis, without the tail that binary fractions leave. */
+export const tickText = (value: number): string => String(Number(value.toPrecision(6)))
+
 const rounded = (position: number) => Math.round(position * 100) / 100
 
 /** A linear axis from 0 (or a lower value) to a round end. */

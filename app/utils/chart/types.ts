@@ -6,7 +6,7 @@ export interface ChartColumn { key: string, label: string, unit?: string, align?
 /** A row of that table by column key; null prints as a dash and leaves its CSV field empty. */
 export type ChartTableRow = Record<string, string | number | null>
 
-/** One pull: the highest load it held; at the limit of the rig it would have held more. */
+/** One pull: the highest load it held; at the limit (of the rig, as a rule) it never moved and would have held more. */
 export interface StripPull { value: number, atLimit: boolean }
 
 export interface StripRow {
