@@ -48,8 +48,8 @@ export function summaryOf(names: readonly [string, string], seabeds: readonly (J
   for (const [name, ahead] of [[first, true], [second, false]] as const) {
     const very = placesOf(seabeds, ['veryLikely'], ahead)
     const more = placesOf(seabeds, ['moreLikely'], ahead)
-    if (very.length > 0) clauses.push(`${name} very likely holds more on ${listed(very)}`)
-    if (more.length > 0) clauses.push(`${name} more likely than not holds more on ${listed(more)}`)
+    const parts = [...very.length > 0 ? [`very likely on ${listed(very)}`] : [], ...more.length > 0 ? [`more likely than not on ${listed(more)}`] : []]
+    if (parts.length > 0) clauses.push(`${name} holds more, ${parts.join(', ')}`)
   }
   const even = placesOf(seabeds, ['cannotTell'])
   const thin = placesOf(seabeds, ['notTested'])

@@ -1,4 +1,3 @@
-import * as z from 'zod/mini'
 import { fieldsOf, slug } from './fields'
 import { rankingRequest } from './ranking'
 

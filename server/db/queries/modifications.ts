@@ -1,5 +1,4 @@
 import { and, asc, desc, eq, isNotNull, isNull, sql } from 'drizzle-orm'
-import { alias } from 'drizzle-orm/pg-core'
 import type { ModificationListing, PairSide, PulledPair } from '../../../shared/types/modification'
 import type { Fouling, NumberedSeabed, PullEnd, SettingOutcome } from '../../../shared/types/words'
 import type { Database, Transaction } from '../client'

@@ -79,7 +79,7 @@ describe('compareAnchors', () => {
     const { seabeds, summary } = compare([{ design: 'birch' }, { design: 'cedar' }])
     // ln(3100/3000) = 0.0328 with sd 0.1414: Phi(0.232) = 0.592
     expect(seabeds[1]?.pairs[0]).toMatchObject({ verdict: 'cannotTell', words: 'Cannot tell Birch and Cedar apart on loose sand: Birch is ahead with a chance of 59 %, a coin-toss.' })
-    expect(summary).toEqual(['Birch against Cedar: Birch very likely holds more on firm mud; the pulls cannot tell them apart on loose sand.'])
+    expect(summary).toEqual(['Birch against Cedar: Birch holds more, very likely on firm mud; the pulls cannot tell them apart on loose sand.'])
   })
 
   it('names masses where they differ, and says when they are scaled', () => {
@@ -121,7 +121,7 @@ describe('the words', () => {
       { seabed: 'loose-sand', chance: 0.95, verdict: 'veryLikely' },
       { seabed: 'firm-mud', chance: 0.2, verdict: 'moreLikely' },
       { seabed: 'hard-sand', chance: 0.97, verdict: 'veryLikely' },
-    ])).toBe('A against B: A very likely holds more on loose sand and hard sand; B more likely than not holds more on firm mud.')
+    ])).toBe('A against B: A holds more, very likely on loose sand and hard sand; B holds more, more likely than not on firm mud.')
     expect(summaryOf(['A', 'B'], [])).toBe('A against B: nothing is known of both on any of these seabeds.')
   })
 })
