@@ -6,7 +6,7 @@ import type { PullRecord } from '#shared/types/holding'
 import type { DescribedRows, ReleasePull } from '#shared/types/release'
 import type { Database } from '../db/client'
 import { describe } from '../db/queries/described'
-import { fitIdFor, insertFit, readFit } from '../db/queries/fits'
+import { fitIdFor, insertFit, lockFits, readFit } from '../db/queries/fits'
 import { insertRelease, pullIdsAt, pullsOf, releaseOf } from '../db/queries/releases'
 import { runRefit } from './fitWorker'
 import { buildRelease } from './release/package'
@@ -40,6 +40,7 @@ export async function makeRelease(db: Database, { version, cutAt, notes }: Relea
   if (!records.some(({ set }) => set)) throw new Error(`release ${version} needs pulls published by ${cutAt}: there are none`)
   const fitted = await fitIdFor(db, modelVersion, dataHash(records)) === null ? await run(records, signal) : null
   return db.transaction(async (tx) => {
+    await lockFits(tx)
     const fitId = await fitIdFor(tx, modelVersion, dataHash(records)) ?? (fitted && await insertFit(tx, fitted))
     const fit = fitId === null ? null : await readFit(tx, fitId)
     if (!fit || fitId === null) throw new Error(`release ${version} has lost its fit`)
