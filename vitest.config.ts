@@ -1,4 +1,5 @@
 import { fileURLToPath } from 'node:url'
+import vue from '@vitejs/plugin-vue'
 import { defineConfig, type TestProjectInlineConfiguration } from 'vitest/config'
 
 const folder = (name: string) => fileURLToPath(new URL(`./${name}`, import.meta.url))
@@ -14,6 +15,7 @@ export default defineConfig({
     maxWorkers: 2,
     projects: [
       project('unit', 'tests/unit/**/*.test.ts', { testTimeout: 30_000 }),
+      { ...project('nuxt', 'tests/nuxt/**/*.test.ts', { environment: 'happy-dom', testTimeout: 30_000 }), plugins: [vue()] },
       project('reference', 'tests/reference/**/!(*.long).test.ts', { testTimeout: 120_000 }),
       project('architecture', 'tests/architecture/**/*.test.ts', { testTimeout: 60_000 }),
       project('api', 'tests/api/**/*.test.ts', served),

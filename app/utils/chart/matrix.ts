@@ -20,11 +20,11 @@ export function matrixBlocks(columns: readonly MatrixColumn[], rows: readonly Ma
 /** A row of the wide drawing, as high as its label needs. */
 export interface MatrixLine { row: MatrixRow, label: readonly string[], top: number, height: number, index: number }
 
-export function matrixRows(rows: readonly MatrixRow[], head: number, most: number): MatrixLine[] {
+export function matrixRows(rows: readonly MatrixRow[], head: number, most: number, missingLines: number): MatrixLine[] {
   let top = head
   return rows.map((row, index) => {
     const label = wrapped(row.label, most)
-    const line = { row, label, top, height: Math.max(18 * label.length + 14, 52), index }
+    const line = { row, label, top, height: Math.max(18 * label.length + 14, row.cells.includes(null) ? 16 * missingLines + 14 : 0, 52), index }
     top += line.height
     return line
   })
