@@ -8,10 +8,10 @@ import { patternId } from '~/utils/seabedTiles'
 /** Ratios as the plot draws them: a row a seabed, the design in front where it was tried on several. */
 export function ratioRows({ ratios, designs }: ModificationListing): RatioRow[] {
   const nameOf = (slug: string) => designs.find(design => design.slug === slug)?.name ?? slug
-  return ratios.map(({ design, seabed, ratio, pairs, verdict }) => ({
+  return ratios.map(({ design, seabed, ratio, pulls, verdict }) => ({
     label: designs.length > 1 ? `${nameOf(design)}, ${seabedFacts(seabed).name}` : seabedFacts(seabed).name,
     pattern: patternId(seabed),
-    ratio: ratio.median, low90: ratio.low90, high90: ratio.high90, n: pairs, verdict: verdictWords(verdict),
+    ratio: ratio.median, low90: ratio.low90, high90: ratio.high90, n: pulls, verdict: verdictWords(verdict),
   }))
 }
 

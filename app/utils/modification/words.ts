@@ -15,9 +15,14 @@ export const listWords = (words: readonly string[]): string => words.length < 2 
 /** With its sign, a true minus: `+2.1 kN`, `−4 kn`. */
 export const signed = (value: number, format: (size: number) => string): string => `${value < 0 ? '−' : '+'}${format(Math.abs(value))}`
 
-/** `−2.1 kN (−2.7 to −1.3)`: a change with its 90 % interval. */
-export function changeWords({ median, low90, high90 }: Span, format: (size: number) => string): string {
-  return `${signed(median, format)} (${signed(low90, format)} to ${signed(high90, format)})`
+/**
+ * `−2.1 kN (−2.7 to −1.3)`: a change with its 90 % interval.
+ *
+ * @param format with the unit
+ * @param bare without it
+ */
+export function changeWords({ median, low90, high90 }: Span, format: (size: number) => string, bare: (size: number) => string): string {
+  return `${signed(median, format)} (${signed(low90, bare)} to ${signed(high90, bare)})`
 }
 
 const on = ({ seabed }: { seabed: ModificationRatio['seabed'] }) => seabedFacts(seabed).name
