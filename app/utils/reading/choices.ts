@@ -39,8 +39,12 @@ export function readChoices<Readers extends Record<string, Reader<unknown>>>(que
     const text = (given.at(-1) ?? '').trim()
     if (text === '') continue
     const value = read(text)
-    if (value === undefined) ignored.push({ key, text: text.slice(0, 40) })
-    else Object.assign(values, { [key]: value }) && Object.assign(typed, { [key]: text })
+    if (value === undefined) {
+      ignored.push({ key, text: text.slice(0, 40) })
+      continue
+    }
+    values[key] = value
+    typed[key] = text
   }
   return { values: values as { [K in keyof Readers]?: Exclude<ReturnType<Readers[K]>, undefined> }, typed: typed as { [K in keyof Readers]?: string }, ignored }
 }
