@@ -43,9 +43,11 @@ export function answerInWords({ ratios }: Pick<ModificationListing, 'ratios'>): 
 
 /** What it costs and weighs, as far as it is stated. */
 export function costInWords({ price, addedMassKg }: Pick<ModificationListing, 'price' | 'addedMassKg'>, show: Show): string {
-  const money = price === null ? 'No price is stated' : `It costs ${moneyInWords(price.minor, price.currency)}`
-  if (addedMassKg === null) return `${money}; what it weighs is not stated.`
-  return `${money} and ${addedMassKg < 0 ? 'takes off' : 'adds'} ${show.mass(Math.abs(addedMassKg))}.`
+  const weight = addedMassKg === null ? null : `${addedMassKg < 0 ? 'takes off' : 'adds'} ${show.mass(Math.abs(addedMassKg))}`
+  const mass = weight === null ? 'what it weighs is not stated' : `it ${weight}`
+  if (price === null) return `No price is stated; ${mass}.`
+  const money = `It costs ${moneyInWords(price.minor, price.currency)}`
+  return weight === null ? `${money}; ${mass}.` : `${money} and ${weight}.`
 }
 
 interface Priced { design: string, massKg: number, price: { minor: number, currency: string } | null }
@@ -73,7 +75,7 @@ function gain(worth: SeabedWorth, show: Show): string {
  * is worth where it is worse, that it buys nothing that matters, or that the pulls cannot tell.
  */
 export function judgeWorth(listing: Pick<ModificationListing, 'price'>, { seabeds, massKg }: ModificationWorth, sizes: readonly Priced[], show: Show): string[] {
-  const cost = listing.price === null ? 'Whatever it costs' : `For ${moneyInWords(listing.price.minor, listing.price.currency)}`
+  const cost = listing.price === null ? 'Whatever it costs,' : `For ${moneyInWords(listing.price.minor, listing.price.currency)}`
   const of = (verdict: Verdict) => seabeds.filter(worth => worth.verdict === verdict)
   const [better, worse] = [largest(of('better')), largest(of('worse'))]
   const sentences: string[] = []

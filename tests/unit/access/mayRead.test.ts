@@ -10,6 +10,8 @@ const everything: Readable[] = [
   { what: 'seabed', seabed: 'rock' },
   { what: 'estimate', seabed: 'loose-sand' },
   { what: 'estimate', seabed: 'firm-mud' },
+  { what: 'comparison', seabed: 'firm-mud' },
+  { what: 'modification', seabed: 'loose-sand' },
 ]
 
 describe('mayRead', () => {
