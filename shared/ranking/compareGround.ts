@@ -8,6 +8,7 @@ import { anchoringVariance } from '#shared/ranking/chance'
 import { mixWithEstimates, type MixSeabed, type RankContext } from '#shared/ranking/context'
 import { planGround } from '#shared/ranking/plan'
 import { planDemand } from '#shared/ranking/planDemand'
+import { withPlanFields } from '#shared/ranking/planFields'
 import { inKg } from '#shared/ranking/plainWords'
 import { defaultTarget } from '#shared/ranking/rank'
 
@@ -49,7 +50,7 @@ function flatGround({ anchors, massKg = referenceMassKg }: ComparisonRequest, fi
  * What the anchors are compared for.
  *
  * @param rigs how many rigs the fit's pulls came from; unknown when left out
- * @throws FieldError for whatever a plan refuses
+ * @throws FieldError for whatever a plan refuses, its field after `plan.`
  */
 export function groundOf(request: ComparisonRequest, fit: StoredFit, rigs?: number): Ground {
   const { plan } = request
@@ -57,9 +58,9 @@ export function groundOf(request: ComparisonRequest, fit: StoredFit, rigs?: numb
     const flat = flatGround(request, fit)
     return { ...flat, cautions: [...flat.cautions, ...fitCautions([], rigs)] }
   }
-  const ground = planGround(plan)
+  const ground = withPlanFields(() => planGround(plan))
   const mix = mixWithEstimates(plan.seabeds, fit)
-  const demand = planDemand(plan, ground)
+  const demand = withPlanFields(() => planDemand(plan, ground))
   return {
     mix,
     context: demand && { demand, variance: anchoringVariance(fit.sigma, fit.sds), target: plan.target ?? defaultTarget, mix },

@@ -9,6 +9,7 @@ import type { PlanDemand } from '#shared/ranking/context'
 import { findHoldingWind } from '#shared/ranking/holdingWind'
 import { planGround } from '#shared/ranking/plan'
 import { greatestWindMs, planDemand } from '#shared/ranking/planDemand'
+import { withPlanFields } from '#shared/ranking/planFields'
 
 /** A function of the ratio, at its median and at both ends of its interval. */
 function spanOf({ median, low90, high90 }: Span, at: (ratio: number) => number): Span {
@@ -64,11 +65,11 @@ function worthOn(estimate: ModificationEstimate, fit: StoredFit, massKg: number,
  *
  * @param estimates of one modification
  * @param plan boat, rode, wind and mass; its seabeds play no part
- * @throws FieldError for whatever a plan refuses
+ * @throws FieldError for whatever a plan refuses, its field after `plan.`
  */
 export function modificationWorth(estimates: readonly ModificationEstimate[], plan: RankingRequest, fit: StoredFit): ModificationWorth {
-  const ground = planGround(plan)
-  const demand = planDemand(plan, ground)
+  const ground = withPlanFields(() => planGround(plan))
+  const demand = withPlanFields(() => planDemand(plan, ground))
   const massKg = ground.massKg ?? referenceMassKg
   return {
     massKg,

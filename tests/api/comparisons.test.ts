@@ -86,6 +86,8 @@ describe('POST /api/comparisons', () => {
   })
 
   it('refuses a rode that is too short', async () => {
-    expectProblem(await send({ anchors: two, plan: { ...rankingRequestExample(), depthM: 200 } }), 422)
+    const answer = await send({ anchors: two, plan: { ...rankingRequestExample(), depthM: 200 } })
+    expectProblem(answer, 422)
+    expect(answer.body.fields).toEqual({ 'plan.rode.chain.lengthM': expect.stringMatching(/too short to reach the bottom/) as string })
   })
 })

@@ -105,7 +105,7 @@ describe('compareAnchors', () => {
   it('refuses an unknown design and an anchor against itself, by the field', () => {
     expect(() => compare([{ design: 'alder' }, { design: 'oak' }])).toThrow(expect.objectContaining({ field: 'anchors.1.design' }) as Error)
     expect(() => compare([{ design: 'alder' }, { design: 'alder', massKg: 15 }])).toThrow(expect.objectContaining({ field: 'anchors.1.design' }) as Error)
-    expect(() => compare(two, { plan: makePlan({ depthM: 60 }) })).toThrow(expect.objectContaining({ field: 'rode.chain.lengthM' }) as Error)
+    expect(() => compare(two, { plan: makePlan({ depthM: 60 }) })).toThrow(expect.objectContaining({ field: 'plan.rode.chain.lengthM' }) as Error)
   })
 })
 
