@@ -62,6 +62,13 @@ async function pair(name, ours, bare) {
   }
 }
 
+/** Pages of the reading side against the bare page, one after another. */
+async function pairsOfPages(base, bareBase, paths) {
+  const rows = []
+  for (const path of paths) rows.push(await pair(path, { url: `${base}${path}` }, { url: bareBase }))
+  return rows
+}
+
 /** The event loop's delay while a fit of the demo world's size runs in the worker, asked for over the API. */
 async function delayDuringFit(server) {
   const ask = async () => {
@@ -122,6 +129,7 @@ export async function benchServed(databaseUrl) {
       printTable('Against the bare application', [
         await pair('/api/rankings', request, post(bare.base, '/api/bare', plan)),
         await pair('/plan', { url: `${server.base}/plan` }, { url: bare.base }),
+        ...await pairsOfPages(server.base, bare.base, ['/designs', '/trials', '/seabeds', '/designs/fennigar', '/seabeds/loose-sand']),
       ])
     }
     finally {
