@@ -53,7 +53,7 @@ describe('a saved drawing', () => {
 
   it('lays stretched paths out in px: pulls at half of the plot stand at half of its width', async () => {
     const { file } = await saved()
-    const laid = /<path d="M([\d.]+) 0v11/.exec(file.text)?.[1]
+    const laid = /<path d="M([\d.]+) 0v8/.exec(file.text)?.[1]
     const wide = mount(HoldingStrip, { props: { rows: strips, load: 3.4, unit: 'kN', format: oneDecimal, axisTitle: 'Holding' } }).get('.chart-wide path.curve').attributes('d') ?? ''
     const percent = Number(/M([\d.]+)/.exec(wide)?.[1])
     expect(Number(laid)).toBeCloseTo(percent / 100 * 500, 1)

@@ -32,7 +32,7 @@ export function placedRows<Row>(rows: readonly Row[], words: (row: Row) => Words
     const lines = wrapped(label, most.label)
     const notes = note ? wrapped(note, most.note) : []
     const below = lineHeight * (lines.length + notes.length)
-    const height = frame.narrow ? below + 46 : Math.max(below + 10, 46)
+    const height = frame.narrow ? below + 50 : Math.max(below + 10, 48)
     const at = { top, height, label: lines, note: notes, lineY: frame.narrow ? top + below + 18 : top + 18, textY: top + 20, noteY: top + 20 + lineHeight * lines.length }
     top += height
     return { row, at, index }
@@ -74,4 +74,24 @@ export function stripKey(rows: readonly StripRow[]): KeyItem[] {
     ...(pulls.some(pull => !pull.atLimit) ? [{ mark: 'pull', text: 'a pull each' } as const] : []),
     ...(pulls.some(pull => pull.atLimit) ? [{ mark: 'limit', text: 'never moved: that or more' } as const] : []),
   ])
+}
+
+/** An open tick: whether its arrow and its count (where several coincide) have room before the next one. */
+export interface HeldPlace { x: number, arrow: boolean, count: number | null }
+
+/**
+ * Places of the pulls that never moved, those that coincide as one.
+ *
+ * @param places in per cent of the plot's width
+ * @param leastWidth the least width in px that the plot is drawn at
+ */
+export function heldPlaces(places: readonly number[], leastWidth: number): HeldPlace[] {
+  const counts = new Map<number, number>()
+  for (const x of [...places].sort((a, b) => a - b)) counts.set(x, (counts.get(x) ?? 0) + 1)
+  const distinct = [...counts]
+  return distinct.map(([x, count], index) => {
+    const next = distinct[index + 1]?.[0]
+    const room = next === undefined ? Number.POSITIVE_INFINITY : (next - x) / 100 * leastWidth
+    return { x, arrow: room >= 12, count: count > 1 && room >= 24 ? count : null }
+  })
 }

@@ -2,7 +2,7 @@ import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
 import { ladderPlot, placedHoldings, rowLetter, spread } from '~/utils/chart/ladder'
 import { matrixBlocks, matrixRows } from '~/utils/chart/matrix'
-import { placedRows, stripAxis, stripKey } from '~/utils/chart/strips'
+import { heldPlaces, placedRows, stripAxis, stripKey } from '~/utils/chart/strips'
 import { columnHeader, tableCsv } from '~/utils/chart/table'
 import { pullsInWords, withUnit, wrapped } from '~/utils/chart/text'
 import type { StripRow } from '~/utils/chart/types'
@@ -39,6 +39,13 @@ describe('a strip chart', () => {
       expect(lastBaseline).toBeLessThan(narrow ? first!.lineY - 8 : first!.top + first!.height)
       expect(first!.label.length).toBeGreaterThan(2)
     }
+  })
+
+  it('joins pulls that never moved at one load, and leaves out arrow and count where the next stands close', () => {
+    expect(heldPlaces([50, 10, 50, 12, 12, 50], 400)).toEqual([
+      { x: 10, arrow: false, count: null }, { x: 12, arrow: true, count: 2 }, { x: 50, arrow: true, count: 3 },
+    ])
+    expect(heldPlaces([10, 10, 14], 400)[0]).toEqual({ x: 10, arrow: true, count: null })
   })
 
   it('explains those marks that it has', () => {
