@@ -39,7 +39,8 @@ export function sourceHash(root, paths) {
 export const buildSources = [
   'app', 'server', 'shared', 'drizzle', 'public', 'nuxt.config.ts', 'tailwind.config.ts', 'package-lock.json', 'tsconfig.json',
 ]
-/** What decides the rows of the demo world. */
+/** What decides the rows of the demo world, and the form of its releases. */
 export const seedSources = [
   'seed/world', 'seed/seed.ts', 'seed/write.ts', 'drizzle', 'server/db/schema', 'shared/types/words.ts', 'shared/seabed', 'shared/rode', 'shared/units',
+  'server/services/release', 'shared/utils/csv.ts',
 ]
