@@ -4,9 +4,9 @@ import type { World } from './types'
 export interface WorldRelease { version: string, cutAt: string, notes: string }
 
 const seasons: readonly (readonly [season: number, notes: string])[] = [
-  [2024, 'The first season: eight seabeds, most designs on two or three days. Four modifications were tried back to back, on sandy mud and on firm mud.'],
+  [2024, 'The first season: all designs, on eight seabeds. Four modifications were tried back to back, on sandy mud and on firm mud.'],
   [2025, 'The second season: cobble over sand for the first time, back-to-back pairs on soft mud and loose sand too, and three days with less chain out, so that the rode lifted.'],
-  [2026, 'The third season: most seabeds pulled once more, and the pairs on soft mud, sandy mud and loose sand made again.'],
+  [2026, 'The third season: every seabed pulled once more, and the pairs on soft mud, sandy mud and loose sand made again.'],
 ]
 
 /** One release a season, cut at the moment its last trial was published. */
