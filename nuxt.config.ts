@@ -55,7 +55,7 @@ export default defineNuxtConfig({
     strict: true,
     tsConfig: { compilerOptions: { noUncheckedIndexedAccess: true } },
     nodeTsConfig: {
-      compilerOptions: { noUncheckedIndexedAccess: true, allowJs: false },
+      compilerOptions: { noUncheckedIndexedAccess: true, allowJs: true, paths: { '~/*': ['../app/*'] } },
       include: ['../*.config.ts', '../tests/**/*.ts', '../seed/**/*.ts'],
     },
   },

@@ -1,6 +1,6 @@
 import type { HoldingWind, RankedRow, RankedSeabed, RankingAnswer } from '#shared/types/ranking'
 import type { Family } from '#shared/types/words'
-import type { Show } from '~/composables/useShow'
+import type { Show } from '~/utils/show'
 import { logScale, roundValues } from '~/utils/scale'
 
 export const familyNames: Readonly<Record<Family, string>> = {
@@ -51,7 +51,7 @@ export function stripScale(answer: RankingAnswer, unitN: number): StripScale {
 export function windCell(wind: HoldingWind | null, show: Show): { mean: string, gust: string } {
   if (wind === null) return { mean: '–', gust: '' }
   if ('reason' in wind) return wind.reason === 'beyond64kn' ? { mean: 'past 64 kn', gust: '' } : { mean: 'not in calm', gust: '' }
-  return { mean: `${wind.atLeast ? '≥ ' : ''}${show.speed(wind.meanMs)}`, gust: `gusting ${show.speed(wind.gustMs)}` }
+  return { mean: `${wind.atLeast ? '≥ ' : ''}${show.holdingSpeed(wind.meanMs)}`, gust: `gusting ${show.holdingSpeed(wind.gustMs)}` }
 }
 
 export type Bracket = 'start' | 'middle' | 'end' | null

@@ -47,7 +47,11 @@ export async function ensureBuild() {
   stamps.set('build', hash)
 }
 
-/** Seeds the database unless this cluster holds this very world. */
+/**
+ * Seeds the database unless this cluster holds this very world.
+ * @param {string} url
+ * @param {{ known?: boolean }} options known: a cluster of this clone's own, which was there before; left out: somebody else's
+ */
 export async function ensureSeed(url, { known }) {
   const hash = sourceHash(root, seedSources)
   if (known && dataStamps.get('seed') === hash) return

@@ -1,6 +1,6 @@
 import type { ComparedPair, ComparedSeabed, ComparisonAnswer } from '#shared/types/comparison'
 import { seabedFacts } from '#shared/seabed/seabeds'
-import type { Show } from '~/composables/useShow'
+import type { Show } from '~/utils/show'
 import type { ChartTableRow, MatrixCell, MatrixColumn, MatrixRow } from '~/utils/chart/types'
 import { titleOf } from '~/utils/compare/strips'
 import { patternId } from '~/utils/seabedTiles'

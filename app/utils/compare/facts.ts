@@ -1,7 +1,7 @@
 import type { ComparedHolding, ComparisonAnswer, EndCounts } from '#shared/types/comparison'
 import type { Share } from '#shared/types/holding'
 import { seabedFacts } from '#shared/seabed/seabeds'
-import type { Show } from '~/composables/useShow'
+import type { Show } from '~/utils/show'
 import { priceInWords } from '~/utils/money'
 import { familyNames, windCell } from '~/utils/ranking'
 

@@ -1,5 +1,5 @@
 import type { ComparedHolding, ComparisonAnswer } from '#shared/types/comparison'
-import type { Show } from '~/composables/useShow'
+import type { Show } from '~/utils/show'
 import { displayUnit } from '#shared/units/systems'
 import type { StripRow } from '~/utils/chart/types'
 

@@ -1,5 +1,5 @@
 import type { RodeAnswer } from '#shared/types/rode'
-import type { Show } from '~/composables/useShow'
+import type { Show } from '~/utils/show'
 
 /** How the pull reaches the anchor, in one sentence. */
 export function describeRode(rode: RodeAnswer, wind: string, show: Show): string {

@@ -1,6 +1,6 @@
 import type { ModificationListing, PairSide } from '#shared/types/modification'
 import { seabedFacts } from '#shared/seabed/seabeds'
-import type { Show } from '~/composables/useShow'
+import type { Show } from '~/utils/show'
 import type { RatioRow } from '~/utils/chart/types'
 import { verdictWords } from '~/utils/modification/words'
 import { patternId } from '~/utils/seabedTiles'

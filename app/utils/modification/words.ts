@@ -1,6 +1,6 @@
 import type { ModificationListing, ModificationRatio, ModificationWorth, SeabedWorth, Span } from '#shared/types/modification'
 import { seabedFacts } from '#shared/seabed/seabeds'
-import type { Show } from '~/composables/useShow'
+import type { Show } from '~/utils/show'
 import { moneyInWords } from '~/utils/money'
 
 type Verdict = ModificationRatio['verdict']

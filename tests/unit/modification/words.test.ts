@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest'
 import type { ModificationRatio, SeabedWorth } from '#shared/types/modification'
-import type { Show } from '~/composables/useShow'
+import type { Show } from '~/utils/show'
 import { moneyInWords } from '~/utils/money'
 import { answerInWords, byWeight, changeWords, costInWords, judgeWorth } from '~/utils/modification/words'
 import { sideWords } from '~/utils/modification/plots'
