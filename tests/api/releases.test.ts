@@ -4,7 +4,7 @@ import { mkdtempSync, readFileSync, readdirSync, rmSync, writeFileSync } from 'n
 import { tmpdir } from 'node:os'
 import { join } from 'node:path'
 import pg from 'pg'
-import { afterAll, beforeAll, describe, expect, it } from 'vitest'
+import { afterAll, beforeAll, describe, expect, it, vi } from 'vitest'
 import { releaseAnswer, releasesAnswer } from '#shared/schemas/answers/release'
 import type { ReleaseListing, ReleasesAnswer } from '#shared/types/release'
 import { readCsv } from '#shared/utils/csv'
@@ -16,6 +16,9 @@ import { rebuildRelease } from '../../server/services/releaseFiles'
 import { expectProblem, get, unlimited } from './client'
 import { startApp, type TestApp } from './harness'
 import { startServer } from './server'
+
+// Whole fits, in processes of their own.
+vi.setConfig({ testTimeout: 180_000 })
 
 let app: TestApp
 let connection: Connection
