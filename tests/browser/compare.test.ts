@@ -11,6 +11,15 @@ let app: TestApp
 let browser: Browser
 const others: { server: Server, drop: () => Promise<void> }[] = []
 
+async function untilMigrated(url: string) {
+  for (let wait = 0; wait < 600; wait++) {
+    const ready = await fetch(`${url}/api/ready`).then(async answer => (await answer.json() as { migrated: boolean }).migrated, () => false)
+    if (ready) return
+    await new Promise(resolve => setTimeout(resolve, 100))
+  }
+  throw new Error('the server did not come up within a minute')
+}
+
 async function worldWith(sql: string): Promise<Server> {
   const { url, drop } = await createTestDatabase()
   const client = new pg.Client({ connectionString: url })
@@ -19,7 +28,7 @@ async function worldWith(sql: string): Promise<Server> {
   await client.end()
   const server = await startServer(url, unlimited, { wait: false })
   others.push({ server, drop })
-  await expect.poll(() => fetch(`${server.baseUrl}/api/ready`).then(async answer => (await answer.json() as { migrated: boolean }).migrated, () => false), { timeout: 60_000 }).toBe(true)
+  await untilMigrated(server.baseUrl)
   return server
 }
 

@@ -36,9 +36,10 @@ export function answerInWords({ ratios }: Pick<ModificationListing, 'ratios'>): 
     ...clause('cannotTell', 'the pulls cannot tell'), ...clause(null, 'there are no back-to-back pairs, so no verdict,'),
   ]
   if (clauses.length === 0) return 'Nobody has pulled it yet.'
-  const matters = where('better').length + where('worse').length > 0
-  const start = matters ? 'Yes: ' : where('cannotTell').length === 0 && where('noDifference').length > 0 ? 'No: ' : 'Cannot tell: '
-  return `${start}${clauses.join('; ')}.`
+  if (where('better').length + where('worse').length > 0) return `Yes: ${clauses.join('; ')}.`
+  if (clauses.length === 1 && where('noDifference').length > 0) return `No: ${clauses[0]}.`
+  const text = clauses.join('; ')
+  return `${text.charAt(0).toUpperCase()}${text.slice(1)}.`
 }
 
 /** What it costs and weighs, as far as it is stated. */
