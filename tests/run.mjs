@@ -59,7 +59,7 @@ async function everything() {
   await check('lint', bin('eslint'), ['.', '--max-warnings', '0'])
   await check('types', bin('nuxt'), ['typecheck'])
   await ensureBuild()
-  await tests('unit', 'reference', 'architecture')
+  await tests('unit', 'nuxt', 'reference', 'architecture')
   await tests('api', 'browser')
 }
 
