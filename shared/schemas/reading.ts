@@ -7,7 +7,7 @@ import { fieldsOf, oneOf, saying, slug } from './fields'
 function numberText(minimum: number, maximum: number, unit: string, description: string, form = /^\d{1,6}(?:\.\d{1,3})?$/) {
   const words = saying(`a number between ${minimum} and ${maximum}${unit && ` ${unit}`}`)
   const text = z.string(words).check(
-    z.regex(form, words), z.refine(value => Number(value) >= minimum && Number(value) <= maximum, words.error), z.describe(unit ? `${description} (${unit})` : description))
+    z.regex(form, words), z.refine(value => Number(value) >= minimum && Number(value) <= maximum, words), z.describe(unit ? `${description} (${unit})` : description))
   return z.pipe(text, z.transform(Number))
 }
 
