@@ -1,6 +1,6 @@
 import { usePreferencesStore } from '~/stores/preferences'
 import { readMode, readUnits } from '~/utils/preferences'
-import { isOwnPath } from '~/utils/ownPath'
+import { safePath } from '~/utils/ownPath'
 
 /**
  * Without JavaScript the choice of display and units is a plain form: it comes in the address, goes into the cookie, and the
@@ -14,5 +14,5 @@ export default defineNuxtRouteMiddleware((to) => {
   const habit = readUnits(units)
   if (mode) preferences.chooseMode(mode)
   if (habit) preferences.chooseUnits(habit)
-  return navigateTo({ path: isOwnPath(to.path) ? to.path : '/', query }, { redirectCode: 303, replace: true })
+  return navigateTo({ path: safePath(to.path), query }, { redirectCode: 303, replace: true })
 })

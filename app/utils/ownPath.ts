@@ -3,3 +3,6 @@
  * it may steer a navigation.
  */
 export const isOwnPath = (path: string): boolean => /^\/(?![/\\])/.test(path)
+
+/** The path itself where it is one on this site, else the home page. */
+export const safePath = (path: string): string => isOwnPath(path) ? path : '/'

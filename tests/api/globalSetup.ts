@@ -13,9 +13,12 @@ const templateName = 'template_kedgewise'
 
 interface Ground { url: string, stop: () => Promise<void> }
 
-// Several projects share this module in one process: the first one lays the ground, the last one clears it.
-let ground: Promise<Ground> | null = null
-let users = 0
+interface Shared { ground: Promise<Ground> | null, users: number }
+
+// Several projects run in one process, each with a copy of this module: the first one lays the ground, the last one clears it.
+const key = Symbol.for('kedgewise ground')
+const holder = globalThis as typeof globalThis & { [key]?: Shared }
+const shared: Shared = holder[key] ??= { ground: null, users: 0 }
 
 async function untilReleased(baseUrl: string) {
   for (let wait = 0; wait < 300; wait++) {
@@ -41,8 +44,7 @@ async function lay(): Promise<Ground> {
     await ensureSeed(cluster.url(templateName), {})
     // The server itself makes the fit and then the releases, as it would for anybody.
     const server = await startServer(cluster.url(templateName))
-    await untilReleased(server.baseUrl)
-    await server.stop()
+    await untilReleased(server.baseUrl).finally(server.stop)
     return { url: cluster.url('postgres'), stop }
   }
   catch (error) {
@@ -52,12 +54,12 @@ async function lay(): Promise<Ground> {
 }
 
 export default async function setup(project: TestProject) {
-  users += 1
-  ground ??= lay()
-  const { url, stop } = await ground
+  shared.users += 1
+  shared.ground ??= lay()
+  const { url, stop } = await shared.ground
   project.provide('postgres', url)
   return async () => {
-    users -= 1
-    if (users === 0) await stop()
+    shared.users -= 1
+    if (shared.users === 0) await stop()
   }
 }
