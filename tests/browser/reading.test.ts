@@ -46,7 +46,7 @@ afterAll(async () => {
   await app?.stop()
 })
 
-const at = (world: World) => world === 'demo' ? app.baseUrl : others.find(other => other.world === world)?.server.baseUrl ?? ''
+const at = (world: World) => world === 'demo' ? app.origin : others.find(other => other.world === world)?.server.origin ?? ''
 
 const states: [string, World, string, number, RegExp][] = [
   ['designs', 'demo', '/designs', 200, /18 designs/],
@@ -96,6 +96,7 @@ describe.each(states)('%s', (_, world, path, status, words) => {
     const { page, context, said, close } = await watch(browser)
     await context.addCookies([{ name: 'preference', value: `${mode}.asAtSea`, url: at(world) }])
     expect(await open(page, at(world) + path)).toBe(status)
+    expect(await page.locator('html').getAttribute('data-mode')).toBe(mode)
     await page.evaluate(() => document.querySelectorAll('details').forEach(details => details.open = true))
     await expectAccessible(page)
     expect(said.filter(line => status === 200 || !line.includes(String(status)))).toEqual([])
@@ -114,7 +115,7 @@ describe.each(states)('%s', (_, world, path, status, words) => {
 describe('reading', () => {
   it.each([true, false])('leads from the list to a design and on to a plan with it (JavaScript: %s)', async (javaScriptEnabled) => {
     const { page, said, close } = await watch(browser, { javaScriptEnabled })
-    await open(page, `${app.baseUrl}/designs`)
+    await open(page, `${app.origin}/designs`)
     await page.selectOption('#designs-family', 'fixed-plough')
     await page.getByRole('button', { name: 'Show' }).click()
     await page.waitForURL(/family=fixed-plough/)
@@ -133,7 +134,7 @@ describe('reading', () => {
 
   it.each([true, false])('reads the chart (JavaScript: %s)', async (javaScriptEnabled) => {
     const { page, close } = await watch(browser, { javaScriptEnabled })
-    await open(page, `${app.baseUrl}/seabeds`)
+    await open(page, `${app.origin}/seabeds`)
     await page.fill('#chart-says', 'S/M')
     await page.getByRole('button', { name: 'Read it' }).click()
     await page.waitForURL(/chart=S/)
@@ -143,7 +144,7 @@ describe('reading', () => {
 
   it('asks about a pull, is told what is wrong, and is thanked', async () => {
     const { page, said, close } = await watch(browser)
-    await open(page, `${app.baseUrl}/trials/tarrack-bight-2024-09-04`)
+    await open(page, `${app.origin}/trials/tarrack-bight-2024-09-04`)
     await page.getByText('Pull 3, Dunnavet of 20 kg').click()
     await page.fill('#ask-3', '          no         ')
     await page.fill('#ask-3-mail', 'reader@example.org')
