@@ -54,7 +54,13 @@ async function everything() {
   await ensurePostgres()
   await ensureChromium()
   mkdirSync(dataFolder, { recursive: true })
-  if (long) return tests('long')
+  if (long) {
+    // Whole calibration campaigns, and every page in every display mode and at every width.
+    process.env.KEDGEWISE_LONG = '1'
+    await ensureBuild()
+    await tests('long')
+    return tests('browser')
+  }
   await run(bin('nuxt'), ['prepare'], { cwd: root, stdio: ['ignore', 'ignore', 'inherit'] })
   await check('lint', bin('eslint'), ['.', '--max-warnings', '0'])
   await check('types', bin('nuxt'), ['typecheck'])

@@ -8,8 +8,8 @@ import { builtServer, root } from '../../seed/host/project.mjs'
 import { freePort, pause, run, say } from '../../seed/host/shell.mjs'
 import { median, printTable } from './table.mjs'
 
-const seconds = 5
-const rounds = 3
+const seconds = Number(process.env.BENCH_SECONDS ?? 5)
+const rounds = Number(process.env.BENCH_ROUNDS ?? 3)
 const connections = 10
 
 const plan = {

@@ -5,6 +5,7 @@ import { unlimited } from '../api/client'
 import { createTestDatabase, startApp, type TestApp } from '../api/harness'
 import { startServer, type Server } from '../api/server'
 import { expectAccessible, launch, open, watch } from './browser'
+import { modes, widths } from './extent'
 
 /** The demo world; one that nobody has fitted; one without modifications. */
 let app: TestApp
@@ -36,9 +37,9 @@ const bases = { demo: '', unfitted: '', empty: '' }
 beforeAll(async () => {
   browser = await launch()
   app = await startApp(unlimited)
-  bases.demo = app.baseUrl
-  bases.unfitted = (await worldWith('update fits set stands_from = null')).baseUrl
-  bases.empty = (await worldWith('delete from estimates where modification_id is not null; update pulls set modification_id = null, pair = null; delete from modifications')).baseUrl
+  bases.demo = app.origin
+  bases.unfitted = (await worldWith('update fits set stands_from = null')).origin
+  bases.empty = (await worldWith('delete from estimates where modification_id is not null; update pulls set modification_id = null, pair = null; delete from modifications')).origin
 }, 240_000)
 afterAll(async () => {
   await browser?.close()
@@ -71,7 +72,7 @@ const states: [string, keyof typeof bases, string, number, RegExp][] = [
 const preference = (url: string, value: string) => [{ name: 'preference', value, url }]
 
 describe.each(states)('%s', (_, world, path, status, words) => {
-  it.each(['day', 'night', 'sun'])('answers as it should, with nothing that axe finds, by %s', async (mode) => {
+  it.each(modes)('answers as it should, with nothing that axe finds, by %s', async (mode) => {
     const { page, context, said, close } = await watch(browser)
     await context.addCookies(preference(bases[world], `${mode}.asAtSea`))
     expect(await open(page, bases[world] + path)).toBe(status)
@@ -82,7 +83,7 @@ describe.each(states)('%s', (_, world, path, status, words) => {
     await close()
   })
 
-  it.each([320, 360, 768])('does not scroll sideways at %i px', async (width) => {
+  it.each(widths)('does not scroll sideways at %i px', async (width) => {
     const { page, close } = await watch(browser, { viewport: { width, height: 760 }, hasTouch: width < 700 })
     await open(page, bases[world] + path)
     await page.evaluate(() => document.querySelectorAll('details').forEach(details => details.open = true))

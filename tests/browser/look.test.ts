@@ -2,6 +2,7 @@ import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import type { Browser, Page } from 'playwright-core'
 import { startApp, type TestApp } from '../api/harness'
 import { expectAccessible, launch, meanLuminance, open, watch } from './browser'
+import { modes, widths } from './extent'
 
 /** How long the page may take to follow on a busy machine. */
 const soon = { timeout: 15_000 }
@@ -35,13 +36,13 @@ const openSections = (page: Page) => page.evaluate(() => {
   for (const details of document.querySelectorAll('details')) details.open = rows.indexOf(details) < 2
 })
 
-const preference = (value: string) => [{ name: 'preference', value, url: app.baseUrl }]
+const preference = (value: string) => [{ name: 'preference', value, url: app.origin }]
 
 describe.each(states)('%s', (_, path) => {
-  it.each(['day', 'night', 'sun'])('has nothing that axe finds, by %s', async (mode) => {
+  it.each(modes)('has nothing that axe finds, by %s', async (mode) => {
     const { page, context, said, close } = await watch(browser)
     await context.addCookies(preference(`${mode}.asAtSea`))
-    const status = await open(page, `${app.baseUrl}${path}`)
+    const status = await open(page, `${app.origin}${path}`)
     await openSections(page)
     await expectAccessible(page)
     // A missing page is reported by the browser itself; nothing else may be.
@@ -49,9 +50,9 @@ describe.each(states)('%s', (_, path) => {
     await close()
   }, 180_000)
 
-  it.each([320, 360, 768])('does not scroll sideways at %i px', async (width) => {
+  it.each(widths)('does not scroll sideways at %i px', async (width) => {
     const { page, close } = await watch(browser, { viewport: { width, height: 760 }, hasTouch: width < 700 })
-    await open(page, `${app.baseUrl}${path}`)
+    await open(page, `${app.origin}${path}`)
     await openSections(page)
     expect(await page.evaluate(() => document.documentElement.scrollWidth)).toBeLessThanOrEqual(width)
     await close()
@@ -62,10 +63,10 @@ describe('day, night and sun', () => {
   it('night is dark from the first byte on, and stays under a mean luminance of 0.03', async () => {
     const { page, context, close } = await watch(browser)
     await context.addCookies(preference('night.asAtSea'))
-    const html = await (await fetch(`${app.baseUrl}/plan`, { headers: { cookie: 'preference=night.asAtSea' } })).text()
+    const html = await (await fetch(`${app.origin}/plan`, { headers: { cookie: 'preference=night.asAtSea' } })).text()
     expect(html).toMatch(/<html[^>]*data-mode="night"/)
     expect(html).toMatch(/<meta name="color-scheme" content="dark"/)
-    await open(page, `${app.baseUrl}/plan?${own}`)
+    await open(page, `${app.origin}/plan?${own}`)
     expect(await meanLuminance(context, page)).toBeLessThan(0.03)
     await close()
   })
@@ -74,14 +75,14 @@ describe('day, night and sun', () => {
     ['sun', '@media (prefers-contrast: more)', { contrast: 'more' }, 'rgb(255, 255, 255)'],
     ['day', 'nothing', {}, 'rgb(251, 248, 241)']] as const)('%s follows %s', async (_, __, options, paper) => {
     const { page, close } = await watch(browser, options)
-    await open(page, `${app.baseUrl}/`)
+    await open(page, `${app.origin}/`)
     expect(await page.evaluate(() => getComputedStyle(document.documentElement).backgroundColor)).toBe(paper)
     await close()
   })
 
   it.each([true, false])('the choice is kept in one cookie and never in the address (JavaScript: %s)', async (javaScriptEnabled) => {
     const { page, context, close } = await watch(browser, { javaScriptEnabled })
-    await open(page, `${app.baseUrl}/plan?length=9+m`)
+    await open(page, `${app.origin}/plan?length=9+m`)
     await page.selectOption('select[name=display]', 'night')
     await page.selectOption('select[name=units]', 'imperial')
     if (!javaScriptEnabled) await page.getByRole('button', { name: 'Set' }).click()
@@ -96,13 +97,13 @@ describe('day, night and sun', () => {
   })
 
   it('takes no other value from a cookie or an address', async () => {
-    const html = await (await fetch(`${app.baseUrl}/plan?display=%22%3E%3Cscript%3E&units=furlongs`, {
+    const html = await (await fetch(`${app.origin}/plan?display=%22%3E%3Cscript%3E&units=furlongs`, {
       headers: { cookie: 'preference=%22%3E%3Cscript%3E.x' }, redirect: 'follow' })).text()
     expect(html).not.toMatch(/data-mode|<script>/)
   })
 
   it.each(['//evil.example', '/\\evil.example', '/%5Cevil.example'])('is not led away to %s', async (path) => {
-    const answer = await fetch(`${app.baseUrl}${path}?display=night`, { redirect: 'manual' })
+    const answer = await fetch(`${app.origin}${path}?display=night`, { redirect: 'manual' })
     expect(answer.headers.get('location') ?? '/').toMatch(/^\/(?![/\\])/)
   })
 })

@@ -6,6 +6,7 @@ import { unlimited } from '../api/client'
 import { startServer, type Server } from '../api/server'
 import { expectAccessible, launch, open, watch } from './browser'
 import { markupFaults } from './markup'
+import { modes } from './extent'
 
 /** Servers on worlds of their own: the demo world; one that nobody fitted; one with nothing in it; one whose pulls are gone. */
 const worlds = {
@@ -92,7 +93,7 @@ describe.each(states)('%s', (_, world, path, status, words) => {
     expect(html).toMatch(/invented/i)
   })
 
-  it.each(['day', 'night'])('has nothing that axe finds and a clean console, by %s', async (mode) => {
+  it.each(modes)('has nothing that axe finds and a clean console, by %s', async (mode) => {
     const { page, context, said, close } = await watch(browser)
     await context.addCookies([{ name: 'preference', value: `${mode}.asAtSea`, url: at(world) }])
     expect(await open(page, at(world) + path)).toBe(status)
